@@ -1,0 +1,370 @@
+/**
+ * The plain types handed from stage to stage. Everything is in base units: N, mm, MPa (= N/mm²),
+ * K for temperature differences, °C for temperatures, ms since 1970 for times on the record's own clock.
+ * An optional quantity that the user did not give is `null`, never `NaN`.
+ */
+
+/** One sample's standing in one temperature history. */
+export const VALID = 0;
+/** Missing in the record, bridged by a straight line, and short enough to count as covered. */
+export const FILLED = 1;
+/** Missing in the record and bridged by a straight line, but not counted as covered. */
+export const BRIDGED = 2;
+
+/** A part of the building with one temperature history. */
+export interface Zone {
+  readonly name: string;
+  /** Temperature at each sample of the record [°C]. */
+  readonly temperature: Float64Array;
+  /** `VALID`, `FILLED` or `BRIDGED` at each sample. */
+  readonly standing: Uint8Array;
+  /** True where the job gives the zone one temperature for all time. */
+  readonly constant: boolean;
+}
+
+/** The time axis that all zones share. */
+export interface RecordAxis {
+  /** Time of each sample [ms since 1970 on the record's own clock], rising. */
+  readonly times: Float64Array;
+  /** Median step between samples [h]. */
+  readonly stepHours: number;
+  /** Rows missing between sample i−1 and i that were short enough to be filled, as hours [h]. */
+  readonly filledHoursBefore: Float64Array;
+}
+
+/** A member's flexural-buckling rule. */
+export type BucklingRule =
+  | { readonly rule: 'EN'; readonly imperfection: number; readonly plateau: number }
+  | { readonly rule: 'AISC' };
+
+export interface Member {
+  readonly id: string;
+  /** Young's modulus E [MPa]. */
+  readonly modulus: number;
+  /** Coefficient of thermal expansion α [1/K]. */
+  readonly expansion: number;
+  /** Gross area A [mm²]. */
+  readonly area: number;
+  /** Net area at a fastener [mm²]; the gross area where the user gave none. */
+  readonly netArea: number;
+  /** Second moment of area about the weak axis [mm⁴]. */
+  readonly inertia: number | null;
+  /** Yield strength f_y [MPa]. */
+  readonly yield: number | null;
+  readonly buckling: BucklingRule | null;
+  /** Multiplies the flexural resistance: φ or 1/γ_M1; 1 where the user gave none. */
+  readonly bucklingFactor: number;
+  /** Multiplies N/A: stress concentration or a share of secondary stress; 1 where the user gave none. */
+  readonly stressFactor: number;
+  /** Thickness for a curve's thickness factor [mm]. */
+  readonly thickness: number | null;
+  /** Stress curve of the connection detail in the member. */
+  readonly curve: Curve | null;
+}
+
+export type ShearRangeRule = 'required' | 'exempts';
+
+/** One type of fastener with its joint. Stiffness, grip, areas and resistances are each fastener's. */
+export interface Fastener {
+  readonly id: string;
+  /** Fasteners side by side in one connection. */
+  readonly perConnection: number;
+  /** Shear stiffness k of one fastener [N/mm]; `null` is rigid. */
+  readonly stiffness: number | null;
+  /** Slip each way from the centre before the fastener bears, c [mm]. */
+  readonly freePlay: number;
+  /** Friction force before one fastener's joint slips, g [N]. */
+  readonly grip: number;
+  readonly shearArea: number | null;
+  /** Design shear resistance V_Rd [N]. */
+  readonly shearResistance: number | null;
+  /** Design tension resistance T_Rd [N]. */
+  readonly tensionResistance: number | null;
+  /** Exponent p of the combined check. */
+  readonly interaction: number | null;
+  /** Allowed shear range [N]. */
+  readonly shearRangeLimit: number | null;
+  readonly shearRangeRule: ShearRangeRule;
+  /** Force curve, or stress curve on the shear area. */
+  readonly curve: Curve | null;
+}
+
+/** What happens below a curve's last point. */
+export type BelowLast = 'cutoff' | 'continue' | 'threshold';
+
+/**
+ * The line of an S-N curve as the numeric core sees it: cycles to failure over range, whole and unfactored.
+ * Ranges in MPa for a stress curve and in N for a force curve.
+ */
+export type CurveLine =
+  | {
+      readonly kind: 'points';
+      /** Cycles to failure at each point, rising. */
+      readonly cycles: Float64Array;
+      /** Range at each point, falling strictly. */
+      readonly ranges: Float64Array;
+      /** Slope m of N ∝ S^−m below the last point where the line goes on. */
+      readonly slopeBelow: number;
+      /** Slope m above the first point. */
+      readonly slopeAbove: number;
+    }
+  | {
+      readonly kind: 'formula';
+      /** Cycles to failure at a range, real, positive and falling over [from, to]. */
+      readonly cyclesAt: (range: number) => number;
+      readonly from: number;
+      readonly to: number;
+    };
+
+export interface Curve {
+  readonly id: string;
+  readonly of: 'stress' | 'force';
+  readonly line: CurveLine;
+  readonly below: BelowLast;
+  /** Range at and under which `below` applies: the last point's, or the threshold. */
+  readonly limitRange: number;
+  /** The member area that the stress is reckoned on. */
+  readonly on: 'net' | 'gross';
+  /** Share of a cycle's compressive part that counts, 0 … 1. */
+  readonly compressionShare: number;
+  /** Divides the curve's cycles: 10^(z·s) of the stated scatter and survival; 1 where none. */
+  readonly survivalDivisor: number;
+  /** Ranges are multiplied by (t/t_ref)^exponent where the member is thicker than t_ref. */
+  readonly thicknessEffect: { readonly reference: number; readonly exponent: number } | null;
+}
+
+export type Role = 'fixed' | 'slotted';
+
+export interface Run {
+  readonly id: string;
+  readonly member: Member;
+  /** From the member's left end to each fastener [mm], rising. */
+  readonly positions: Float64Array;
+  readonly roles: readonly Role[];
+  /** The fastener type at each position. */
+  readonly fasteners: readonly Fastener[];
+  readonly zone: Zone;
+  /** Member temperature at which the fasteners were tightened [°C]. */
+  readonly lockIn: number;
+  readonly structure: Structure | null;
+  /** Member beyond the last fastener [mm]. */
+  readonly overhang: number;
+  /** Name of the line of runs that this one is part of. */
+  readonly line: string | null;
+  /** Joint gap at the run's right end, measured at lock-in [mm]. */
+  readonly gap: number | null;
+  /** How far off its centre a bolt may have been set in its slot [mm]. */
+  readonly settingTolerance: number;
+  /** Design tension of each fastener from other loads, already factored [N]. */
+  readonly addedTension: number;
+  /** Design shear of each fastener from other loads, already factored [N]. */
+  readonly addedShear: number;
+}
+
+/** The structure behind a run. */
+export interface Structure {
+  readonly zone: Zone;
+  /** α_s [1/K]. */
+  readonly expansion: number;
+  /** Its temperature when the fasteners were tightened [°C]. */
+  readonly lockIn: number;
+}
+
+export interface Limits {
+  /** Design life [years of 8,766 h]. */
+  readonly designLife: number;
+  /** Allowed Miner sum. */
+  readonly damage: number;
+  /** γ on every range from the load side. */
+  readonly loadFactor: number;
+  /** γ on a member's ranges from the resistance side. */
+  readonly memberFactor: number;
+  /** γ on a fastener's ranges from the resistance side. */
+  readonly fastenerFactor: number;
+  /** On peak forces in the static checks. */
+  readonly staticFactor: number;
+}
+
+export type Residue = 'repeat' | 'half';
+
+export interface CountingSettings {
+  readonly residue: Residue;
+  /** Force ranges of a fastener under this are dropped [N]; 0 is none. */
+  readonly forceGate: number;
+  /** Stress ranges of a member under this are dropped [MPa]; 0 is none. */
+  readonly stressGate: number;
+}
+
+/** A pair of temperatures that the record need not hold, for static and movement checks only. */
+export interface Extreme {
+  readonly name: string;
+  /** Temperature of each zone that it names [°C]. */
+  readonly temperatures: ReadonlyMap<string, number>;
+}
+
+export interface InputFile {
+  /** As the user named it, relative to the job file. */
+  readonly name: string;
+  readonly sha256: string;
+}
+
+/** A value that was left out of the input and stands at its default. */
+export interface DefaultUsed {
+  /** Such as `limits.damage` or `fasteners bracket: free_play`. */
+  readonly key: string;
+  /** As a person would write it, with its unit. */
+  readonly value: string;
+}
+
+export interface Job {
+  readonly title: string;
+  readonly units: 'SI' | 'US';
+  readonly axis: RecordAxis;
+  readonly zones: readonly Zone[];
+  /** Years that the record stands for, where the job says so. */
+  readonly represents: number | null;
+  readonly extremes: readonly Extreme[];
+  readonly limits: Limits;
+  readonly counting: CountingSettings;
+  readonly curves: readonly Curve[];
+  readonly runs: readonly Run[];
+  readonly inputs: readonly InputFile[];
+  readonly defaults: readonly DefaultUsed[];
+  readonly warnings: readonly string[];
+}
+
+/** The checks of a connection in the order that breaks ties for the governing one. */
+export const CHECKS = [
+  'member damage',
+  'fastener damage',
+  'shear range',
+  'peak shear',
+  'combined',
+  'yield range',
+  'slot travel',
+  'buckling',
+] as const;
+export type CheckName = (typeof CHECKS)[number];
+
+export type CheckStatus = 'pass' | 'fail' | 'not given' | 'exempt';
+export type CheckUnit = 'N' | 'MPa' | 'mm' | '1';
+
+/** One demand against one limit at one connection, in base units. */
+export interface Check {
+  readonly check: CheckName;
+  readonly demand: number | null;
+  readonly limit: number | null;
+  readonly unit: CheckUnit;
+  readonly utilisation: number | null;
+  readonly status: CheckStatus;
+  /** When the demand arose: a time of the record, `extreme NAME`, or blank. */
+  readonly when: string;
+}
+
+/** Counted ranges of one series, unfactored. */
+export interface Spectrum {
+  /** Ranges of whole cycles [N or MPa], in no order. */
+  readonly ranges: Float64Array;
+  /** Ranges of half cycles, in no order; empty under residue `repeat`. */
+  readonly halfRanges: Float64Array;
+}
+
+/** Damage and cycles of one series against one curve. */
+export interface Damage {
+  /** Miner sum of the counted pass, factors applied; `null` without a curve. */
+  readonly sum: number | null;
+  /** Cycles counted, a half cycle as 0.5, after the gate. */
+  readonly cycles: number;
+  /** Cycles that do damage, n_d. */
+  readonly damagingCycles: number;
+  /** Unfactored range S with N(γS) = n_d/D; `null` where D is 0 or there is no curve. */
+  readonly equivalentRange: number | null;
+  /** Slope m of the curve at the factored equivalent range; `null` with it. */
+  readonly slope: number | null;
+  /** Cycles that the gate dropped, and the Miner sum that they would have added. */
+  readonly gatedCycles: number;
+  readonly gatedDamage: number;
+}
+
+/** One row of a cycles table. */
+export interface RangeBin {
+  readonly from: number;
+  readonly to: number;
+  readonly count: number;
+  /** Cycles to failure at the factored mid-range; `null` without a curve, `Infinity` where it does none. */
+  readonly cyclesToFailure: number | null;
+  /** Damage of the bin in the counted pass, summed cycle by cycle; `null` without a curve. */
+  readonly damage: number | null;
+}
+
+export interface Connection {
+  readonly run: string;
+  /** 1 … n from the left. */
+  readonly number: number;
+  readonly position: number;
+  readonly fastener: Fastener;
+  readonly role: Role;
+  /** Largest |f| of one fastener from lock-in on and at the extremes, unfactored [N]. */
+  readonly shearPeak: number;
+  /** max − min of one fastener's f in the counted pass [N]. */
+  readonly shearRange: number;
+  readonly fastenerDamage: Damage;
+  /** max − min of σ on the worse side in the counted pass [MPa]. */
+  readonly stressRange: number;
+  readonly memberDamage: Damage;
+  readonly cyclesPerYear: number;
+  readonly fastenerDamagePerYear: number | null;
+  readonly memberDamagePerYear: number | null;
+  /** Years; `Infinity` is unlimited, `null` where no curve was given. */
+  readonly life: number | null;
+  /** Largest |s| from lock-in on and at the extremes [mm]. */
+  readonly slipPeak: number;
+  /** Σ|Δs| a year [mm]. */
+  readonly slidingPerYear: number;
+  readonly bucklingUtilisation: number | null;
+  readonly checks: readonly Check[];
+  readonly governing: Check | null;
+  readonly verdict: Verdict;
+  readonly remedy: string;
+}
+
+export type Verdict = 'ok' | 'fails';
+
+/** Forces of one run at every sample of the counted pass, for one connection: what a chart draws. */
+export interface Trace {
+  /** Shear of one fastener at each sample [N]. */
+  readonly shear: Float64Array;
+  /** Force of the worse span beside it at each sample, tension positive [N]. */
+  readonly spanForce: Float64Array;
+  /** The fastener's slip at each sample [mm]. */
+  readonly slip: Float64Array;
+}
+
+export interface RunResult {
+  readonly run: Run;
+  /** Passes through the record until no slip changed. */
+  readonly passes: number;
+  /** True where it had not settled after the last allowed pass. */
+  readonly walks: boolean;
+  /** Drift of the fastest walking slip a year [mm]; 0 where settled. */
+  readonly driftPerYear: number;
+  /** Years that one pass of the record stands for, for this run. */
+  readonly years: number;
+  readonly coveredHours: number;
+  readonly connections: readonly Connection[];
+  /** Index into `connections` of the one whose governing check is largest. */
+  readonly governing: number;
+  /** Largest and smallest span force in the counted pass, each over all spans [N]; zero without a span. */
+  readonly largestSpanForce: number;
+  /** Of the governing connection. */
+  readonly fastenerBins: readonly RangeBin[];
+  readonly memberBins: readonly RangeBin[];
+  readonly trace: Trace;
+}
+
+export interface Result {
+  readonly job: Job;
+  readonly runs: readonly RunResult[];
+  /** Index into `runs` of the one whose governing utilisation is largest. */
+  readonly governing: number;
+}
