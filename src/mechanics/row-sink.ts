@@ -1,0 +1,44 @@
+import { type Chain, MARK } from './chain-state.ts';
+
+/**
+ * Collects the forces of all connections at every event and turning point, in blocks: row-major, one row a moment, one
+ * column a fastener. A full block goes to `onBlock`, and its place is used again.
+ */
+export class RowSink {
+  readonly columns: number;
+  readonly capacity: number;
+  /** Forces f of the block's rows [N]. */
+  readonly values: Float64Array;
+  /** How far along the record's path each row lies: leg and share of the leg. */
+  readonly marks: Float64Array;
+  rows = 0;
+  private readonly onBlock: (sink: RowSink) => void;
+
+  constructor(columns: number, onBlock: (sink: RowSink) => void) {
+    this.columns = columns;
+    // some 256 KiB a block stay in the cache while every column is counted
+    this.capacity = Math.min(4096, Math.max(64, Math.floor(32_768 / columns)));
+    this.values = new Float64Array(this.capacity * columns);
+    this.marks = new Float64Array(this.capacity);
+    this.onBlock = onBlock;
+  }
+
+  /** Adds the chain's forces now as one row. */
+  take(chain: Chain): void {
+    writeRow(chain, this.values, this.rows * this.columns);
+    this.marks[this.rows] = chain.now[MARK];
+    this.rows++;
+    if (this.rows === this.capacity) this.flush();
+  }
+
+  /** Hands on what is there. */
+  flush(): void {
+    if (this.rows > 0) this.onBlock(this);
+    this.rows = 0;
+  }
+}
+
+function writeRow(chain: Chain, values: Float64Array, at: number): void {
+  const { count, tangent, movement, offset } = chain;
+  for (let i = 0; i < count; i++) values[at + i] = tangent[i] * movement[i] + offset[i];
+}
