@@ -1,0 +1,266 @@
+/**
+ * The edge between the user's units and the base units of the core (N, mm, MPa, K, °C, years, h).
+ * The unit names, their sizes and the arithmetic of compound units are those of mathjs.
+ */
+import { createComplexClass, createFractionClass, createUnitClass } from 'mathjs';
+
+/** What a number measures. A temperature and a difference of temperatures are different things. */
+export type Quantity =
+  | 'length'
+  | 'area'
+  | 'second moment of area'
+  | 'force'
+  | 'stress'
+  | 'stiffness'
+  | 'expansion'
+  | 'temperature'
+  | 'temperature difference'
+  | 'years'
+  | 'hours';
+
+export type UnitSystem = 'SI' | 'US';
+
+/** A number in base units, or what was expected in place of the text. */
+export type Reading =
+  | { readonly value: number }
+  | { readonly expected: string; readonly hint?: string };
+
+interface QuantityUnits {
+  /** As it stands in a message. */
+  readonly name: string;
+  readonly base: string;
+  readonly example: string;
+  readonly SI: string;
+  readonly US: string;
+}
+
+const QUANTITIES: Record<Quantity, QuantityUnits> = {
+  length: { name: 'a length', base: 'mm', example: '600 mm', SI: 'mm', US: 'in' },
+  area: { name: 'an area', base: 'mm^2', example: '450 mm^2', SI: 'mm^2', US: 'in^2' },
+  'second moment of area': {
+    name: 'a second moment of area',
+    base: 'mm^4',
+    example: '16000 mm^4',
+    SI: 'mm^4',
+    US: 'in^4',
+  },
+  force: { name: 'a force', base: 'N', example: '5 kN', SI: 'kN', US: 'kip' },
+  stress: { name: 'a stress', base: 'MPa', example: '80 MPa', SI: 'MPa', US: 'ksi' },
+  stiffness: { name: 'a stiffness', base: 'N/mm', example: '2 kN/mm', SI: 'kN/mm', US: 'kip/in' },
+  expansion: {
+    name: 'an expansion',
+    base: 'K^-1',
+    example: '23e-6 / K',
+    SI: 'K^-1',
+    US: 'degF^-1',
+  },
+  temperature: { name: 'a temperature', base: 'K', example: '21 degC', SI: 'degC', US: 'degF' },
+  'temperature difference': {
+    name: 'a temperature difference',
+    base: 'K',
+    example: '5 K',
+    SI: 'K',
+    US: 'degF',
+  },
+  years: { name: 'a time', base: 'year', example: '50 years', SI: 'year', US: 'year' },
+  hours: { name: 'a time', base: 'h', example: '3 h', SI: 'h', US: 'h' },
+};
+
+/** What each temperature scale reads at 0 °C. */
+const ICE_POINT: Readonly<Record<string, number>> = { degC: 0, K: 273.15, degF: 32 };
+
+/**
+ * Reads a quantity written as a number and its unit, such as `600 mm`, `6.5e-6 / degF` or `9/16 in`.
+ * A bare number takes the unit of its column where there is one, and is refused where there is none.
+ *
+ * @param text the user's text
+ * @param quantity what it must measure
+ * @param columnUnit unit in the column's header, which may hold a power of ten, such as `1e-6/K`
+ * @returns the value in base units (a temperature in °C), or what was expected
+ */
+export function readQuantity(text: string, quantity: Quantity, columnUnit?: string): Reading {
+  const expected = `${QUANTITIES[quantity].name} with its unit, such as ${QUANTITIES[quantity].example}`;
+  const { number, unit } = split(text);
+  if (number === null) return { expected, ...commaHint(text) };
+  if (!Number.isFinite(number)) return { expected: 'a number that is not so large' };
+  const slip = SLIPS.find(([wrong]) => wrong.test(unit === '' ? (columnUnit ?? '') : unit));
+  if (slip !== undefined) return { expected, hint: slip[1] };
+  if (unit !== '') return converted(number, unit, quantity, expected);
+  if (columnUnit === undefined) return { expected };
+  const scale = split(columnUnit);
+  return converted(number * (scale.number ?? 1), scale.unit, quantity, expected);
+}
+
+/** True where the text is a unit that measures the quantity: `mm`, `kN/mm`, `1e-6/K`. */
+export function isUnitOf(text: string, quantity: Quantity): boolean {
+  return 'value' in readQuantity('0', quantity, text);
+}
+
+/**
+ * The first of the quantities that the text is a unit of, or `null`.
+ * @param text a unit, or a quantity with its unit
+ */
+export function quantityOf<Q extends Quantity>(text: string, among: readonly Q[]): Q | null {
+  const { unit } = split(text);
+  return among.find((quantity) => unit !== '' && isUnitOf(unit, quantity)) ?? null;
+}
+
+/** Reads a number without a unit, such as `1.35`, `1e4` or `60 %` (0.6); `null` where it is none. */
+export function readNumber(text: string): number | null {
+  const { number, unit } = split(text);
+  if (number === null || !Number.isFinite(number)) return null;
+  if (unit === '') return number;
+  return unit === '%' ? number / 100 : null;
+}
+
+/**
+ * A value in the units of the results.
+ * @param value in base units (a temperature in °C)
+ */
+export function toUnits(value: number, quantity: Quantity, system: UnitSystem): number {
+  const unit = QUANTITIES[quantity][system];
+  const size = sizeOf(unit, quantity) as number;
+  return quantity === 'temperature' ? value / size + ICE_POINT[unit] : value / size;
+}
+
+/** The unit that `toUnits` writes in, as it stands in a column's header. */
+export function unitName(quantity: Quantity, system: UnitSystem): string {
+  return QUANTITIES[quantity][system].replace('deg', '°');
+}
+
+/** Units that mathjs knows and nobody here means, each with what to write. */
+const SLIPS: readonly (readonly [RegExp, string])[] = [
+  [/\bmPa\b/, 'mPa is a thousandth of a pascal: write MPa.'],
+  [/\bmN\b/, 'mN is a thousandth of a newton: write kN or MN.'],
+  [/\bMm\b/, 'Mm is a thousand kilometres: write mm.'],
+];
+
+const NUMBER = /^([+-]?(?:\d+\.?\d*|\.\d+)(?:e[+-]?\d+)?)(?![\d.,])\s*(.*)$/i;
+const FRACTION = /^(?:(\d+)[ -])?(\d+)\/(\d+)(?![\d.,/])\s*(.*)$/;
+
+/** Text cut into its number and its unit, both in plain characters; no number is `null`. */
+function split(text: string): { number: number | null; unit: string } {
+  const plain = plainCharacters(text);
+  const fraction = FRACTION.exec(plain);
+  if (fraction !== null) {
+    const [, whole = '0', above, below, unit] = fraction;
+    return { number: Number(whole) + Number(above) / Number(below), unit };
+  }
+  const match = NUMBER.exec(plain);
+  if (match === null) return { number: null, unit: plain };
+  // «1/K» is a unit in a header and a quantity in a cell: both read as one over a kelvin.
+  return { number: Number(match[1]), unit: match[2].replace(/^1\s*\//, '/') };
+}
+
+function plainCharacters(text: string): string {
+  return text
+    .replace(/[\u00a0\u202f\u2009]/g, ' ')
+    .replace(/[−–]/g, '-')
+    .replace(/[·⋅]/g, '*')
+    .replace(/[µμ]/g, 'u')
+    .replace(
+      /[⁻⁰¹²³⁴-⁹]+/g,
+      (raised) => `^${[...raised].map((c) => '-0123456789'['⁻⁰¹²³⁴⁵⁶⁷⁸⁹'.indexOf(c)]).join('')}`,
+    )
+    .replace(/(?<=\d)\s*[*×x]\s*10\^/, 'e')
+    .replace(/^10\^/, '1e')
+    .replace(/(?:°|deg)\s*([CF])\b/g, 'deg$1')
+    .replace(/([a-z])(\d)/gi, (pair, letter, digit) =>
+      letter === 'e' ? pair : `${letter}^${digit}`,
+    )
+    .replace(/"$/, ' in')
+    .replace(/\byrs?\b/, 'year')
+    .trim();
+}
+
+function commaHint(text: string): { hint?: string } {
+  return /\d,\d/.test(text) ? { hint: 'Write numbers with a point and no comma: 1250.5.' } : {};
+}
+
+function converted(value: number, unit: string, quantity: Quantity, expected: string): Reading {
+  const size = sizeOf(unit, quantity);
+  if (size === null) return { expected };
+  if (quantity !== 'temperature') return { value: value * size };
+  return { value: (value - ICE_POINT[unit]) * size };
+}
+
+const sizes = new Map<string, number | null>();
+
+/** Size of one unit in the quantity's base unit; `null` where it does not measure the quantity. */
+function sizeOf(unit: string, quantity: Quantity): number | null {
+  const key = `${quantity}|${unit}`;
+  let size = sizes.get(key);
+  if (size === undefined) {
+    size = computeSize(unit, quantity);
+    sizes.set(key, size);
+  }
+  return size;
+}
+
+function computeSize(unit: string, quantity: Quantity): number | null {
+  if (quantity === 'temperature' && !(unit in ICE_POINT)) return null;
+  // A lone temperature unit carries its zero; times a length it is a difference.
+  const difference = quantity === 'temperature' || quantity === 'temperature difference';
+  const times = difference ? ' m' : '';
+  try {
+    const one = Unit().parse(`1 ${unit}${times}`);
+    const base = Unit().parse(`1 ${QUANTITIES[quantity].base}${times}`);
+    return one.equalBase(base) ? one.toNumber(`${QUANTITIES[quantity].base}${times}`) : null;
+  } catch {
+    return null;
+  }
+}
+
+interface MathUnit {
+  equalBase(other: MathUnit): boolean;
+  toNumber(unit: string): number;
+}
+
+interface MathUnitClass {
+  parse(text: string): MathUnit;
+  createUnit(definitions: object, options: object): void;
+}
+
+declare module 'mathjs' {
+  // The library exports these and does not declare them.
+  export function createUnitClass(parts: object): MathUnitClass;
+  export function createFractionClass(parts: object): unknown;
+  export function createComplexClass(parts: object): unknown;
+}
+
+let unitClass: MathUnitClass | undefined;
+
+/**
+ * The library's unit class over plain numbers: without the rest of the library, which takes far longer to load.
+ * Its own kip (4448.2216 N) and psi are rounded; ours follow from the exact pound-force and inch.
+ */
+function Unit(): MathUnitClass {
+  if (unitClass !== undefined) return unitClass;
+  unitClass = createUnitClass({
+    config: { number: 'number', predictable: false },
+    addScalar: (a: number, b: number) => a + b,
+    subtractScalar: (a: number, b: number) => a - b,
+    multiplyScalar: (a: number, b: number) => a * b,
+    divideScalar: (a: number, b: number) => a / b,
+    pow: Math.pow,
+    abs: Math.abs,
+    fix: Math.trunc,
+    round: Math.round,
+    equal: (a: number, b: number) => a === b,
+    isNumeric: (value: unknown) => typeof value === 'number',
+    format: String,
+    number: Number,
+    BigNumber: Number,
+    Complex: createComplexClass({}),
+    Fraction: createFractionClass({}),
+  });
+  unitClass.createUnit(
+    {
+      kip: { definition: '1000 lbf', aliases: ['kips'] },
+      psi: { definition: '1 lbf/in^2' },
+      ksi: { definition: '1000 lbf/in^2' },
+    },
+    { override: true },
+  );
+  return unitClass;
+}
