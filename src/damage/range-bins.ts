@@ -1,0 +1,59 @@
+import { gateSpectrum } from '../counting/gate.ts';
+import type { RangeBin, Spectrum } from '../model.ts';
+import { cyclesToFailure } from './cycles-to-failure.ts';
+import type { DamageTable } from './damage-table.ts';
+import { actingTable, damageOf, type SeriesUse, unfactoredGate } from './miner.ts';
+
+/** Most bins in a table; round widths make it this many or down to half as many. */
+const MOST_BINS = 24;
+
+/** Round widths within a decade. */
+const ROUND = [1, 2, 2.5, 5, 10];
+
+/**
+ * The cycles table of one series: equal bins of a round width from 0 to over the largest range, each
+ * with its cycles and their damage, so that the bins' damage adds up to the Miner sum.
+ *
+ * @param spectrum the series' ranges, unfactored, in the series' unit
+ * @param use curve, factors and gate, as for `minerDamage`
+ * @param shown turns the series' unit into the bins', such as MPa per N; default 1
+ * @returns bins of unfactored range, from ≤ range < to, in the bins' unit, smallest first; none
+ *   without a cycle
+ */
+export function rangeBins(spectrum: Spectrum, use: SeriesUse, shown = 1): RangeBin[] {
+  const { kept } = gateSpectrum(spectrum, unfactoredGate(use));
+  const largest = shown * Math.max(largestOf(kept.ranges), largestOf(kept.halfRanges));
+  if (largest === 0) return [];
+  const width = roundWidth(largest / MOST_BINS);
+  const table = actingTable(spectrum, use);
+  return Array.from({ length: Math.floor(largest / width) + 1 }, (_, bin) => {
+    const inBin = (range: number) => Math.floor((shown * range) / width) === bin;
+    const whole = kept.ranges.filter(inBin);
+    const half = kept.halfRanges.filter(inBin);
+    const damage = damageOf({ ranges: whole, halfRanges: half }, table, use).sum;
+    return {
+      from: bin * width,
+      to: (bin + 1) * width,
+      count: whole.length + 0.5 * half.length,
+      cyclesToFailure: cyclesAt(((bin + 0.5) * width) / shown, table, use),
+      damage: use.table === null ? null : damage,
+    };
+  });
+}
+
+/** Cycles to failure at an unfactored range in the series' unit. */
+function cyclesAt(range: number, table: DamageTable | null, use: SeriesUse): number | null {
+  if (use.table === null) return null;
+  const factored = range * use.table.factor * use.scale;
+  return cyclesToFailure(use.table.curve, factored, table !== null);
+}
+
+function largestOf(ranges: Float64Array): number {
+  return ranges.reduce((largest, range) => Math.max(largest, range), 0);
+}
+
+/** The smallest round number that is no less than `least`. */
+function roundWidth(least: number): number {
+  const decade = 10 ** Math.floor(Math.log10(least));
+  return decade * ROUND.find((round) => round * decade >= least)!;
+}
