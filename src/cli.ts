@@ -1,0 +1,69 @@
+#!/usr/bin/env node
+import { Command, CommanderError, Option } from 'commander';
+import type { CommandOutcome, ScreenOptions } from './commands/screen.ts';
+import { InputError, wordIssue } from './issue.ts';
+import { version } from './output/version.ts';
+
+const OK = 0;
+const A_CHECK_FAILS = 1;
+const BAD_INPUT = 2;
+const UNEXPECTED = 3;
+
+process.exitCode = await main(process.argv);
+
+async function main(argv: readonly string[]): Promise<number> {
+  let code = OK;
+  const program = commands(({ lines, warnings, fails }, strict) => {
+    for (const warning of warnings) console.error(`Warning: ${warning}`);
+    for (const line of lines) console.log(line);
+    if (strict && fails) code = A_CHECK_FAILS;
+  });
+  try {
+    await program.parseAsync(argv);
+    return code;
+  } catch (error) {
+    return explain(error);
+  }
+}
+
+function commands(report: (outcome: CommandOutcome, strict: boolean) => void): Command {
+  const program = new Command('daystrain')
+    .description('Screens thermally cycled fastened connections for fatigue.')
+    .version(version)
+    .exitOverride();
+  program
+    .command('screen')
+    .description('Screen every connection of a job and write tables, charts and a summary.')
+    .argument('<job>', 'the job file, or a folder that holds job.yaml')
+    .option('--out <dir>', "folder for the results (default: reports/ and the job's folder name)")
+    .addOption(
+      new Option(
+        '--charts <which>',
+        'charts of the governing run and an overview, of all runs, or none',
+      )
+        .choices(['governing', 'all', 'none'])
+        .default('governing'),
+    )
+    .option('--strict', 'exit with 1 if any check fails')
+    .action(async (job: string, options: ScreenOptions & { strict?: boolean }) => {
+      const { screenCommand } = await import('./commands/screen.ts');
+      report(await screenCommand(job, options), options.strict ?? false);
+    });
+  return program;
+}
+
+/** Says on stderr what went wrong, and gives the exit code for it. */
+function explain(error: unknown): number {
+  // The option parser has already printed its own message, help or version.
+  if (error instanceof CommanderError) return error.exitCode === 0 ? OK : BAD_INPUT;
+  if (error instanceof InputError) {
+    for (const issue of error.issues) console.error(wordIssue(issue));
+    const count = error.issues.length;
+    console.error(`${count === 1 ? '1 error' : `${count} errors`}. Nothing was written.`);
+    return BAD_INPUT;
+  }
+  const message = error instanceof Error ? error.message : String(error);
+  console.error(`daystrain failed unexpectedly (${message}). Please report this as a fault.`);
+  if (process.env.DAYSTRAIN_DEBUG && error instanceof Error) console.error(error.stack);
+  return UNEXPECTED;
+}

@@ -1,0 +1,82 @@
+import { stat } from 'node:fs/promises';
+import { basename, dirname, join, resolve } from 'node:path';
+import type { Result } from '../model.ts';
+import type { ChartChoice } from '../output/charts/choose-charts.ts';
+import type { OutputFile } from '../output/write-files.ts';
+
+export interface ScreenOptions {
+  /** Folder for the results; by default one under `reports/` with the job's name. */
+  readonly out?: string;
+  readonly charts: ChartChoice;
+}
+
+/** What a command has to say, for the entry point to print. */
+export interface CommandOutcome {
+  readonly lines: readonly string[];
+  readonly warnings: readonly string[];
+  /** True where any check of any connection fails. */
+  readonly fails: boolean;
+}
+
+/**
+ * `daystrain screen`: reads a job, screens it, and writes tables, summary, charts and manifest.
+ *
+ * @param jobPath the job file, or a folder that holds job.yaml
+ * @throws InputError with every issue of the job, or where the results cannot be written
+ */
+export async function screenCommand(
+  jobPath: string,
+  options: ScreenOptions,
+): Promise<CommandOutcome> {
+  const { readJob } = await import('../input/job.ts');
+  const { screen } = await import('../verdict/screen.ts');
+  const { summary } = await import('../output/summary/summary.ts');
+  const job = await readJob(jobPath);
+  const result = screen(job);
+  const text = summary(result);
+  const directory = options.out ?? (await defaultDirectory(jobPath));
+  const files = await write(result, text, directory, options.charts);
+  return {
+    lines: [text, `Written to ${directory}: ${files.join(', ')}`],
+    warnings: job.warnings,
+    fails: result.runs.some((run) => run.connections.some(({ verdict }) => verdict === 'fails')),
+  };
+}
+
+async function write(
+  result: Result,
+  text: string,
+  directory: string,
+  charts: ChartChoice,
+): Promise<string[]> {
+  const { resultsCsv } = await import('../output/results-csv.ts');
+  const { checksCsv } = await import('../output/checks-csv.ts');
+  const { cyclesCsv } = await import('../output/cycles-csv.ts');
+  const { manifestJson } = await import('../output/manifest-json.ts');
+  const { MANIFEST, writeFiles } = await import('../output/write-files.ts');
+  const files: OutputFile[] = [
+    { name: 'summary.txt', content: text },
+    { name: 'results.csv', content: resultsCsv(result) },
+    { name: 'checks.csv', content: checksCsv(result) },
+    { name: 'cycles.csv', content: cyclesCsv(result) },
+    ...(await drawCharts(result, charts)),
+  ];
+  await writeFiles(directory, files, manifestJson(result, files));
+  return [...files.map((file) => file.name), MANIFEST];
+}
+
+async function drawCharts(result: Result, choice: ChartChoice): Promise<OutputFile[]> {
+  if (choice === 'none') return [];
+  const { chooseCharts } = await import('../output/charts/choose-charts.ts');
+  const { renderPngs } = await import('../output/png.ts');
+  return renderPngs(chooseCharts(result, choice));
+}
+
+/** `reports/` and the folder's name, with the job file's name where that is not job.yaml. */
+async function defaultDirectory(jobPath: string): Promise<string> {
+  const path = resolve(jobPath);
+  if ((await stat(path)).isDirectory()) return join('reports', basename(path));
+  const folder = basename(dirname(path));
+  const job = basename(path).replace(/\.(ya?ml|json)$/i, '');
+  return join('reports', job === 'job' ? folder : `${folder}-${job}`);
+}

@@ -1,0 +1,13 @@
+export { readJob } from './input/job.ts';
+export type { Issue, Place } from './issue.ts';
+export { InputError, wordIssue } from './issue.ts';
+export type * from './model.ts';
+export { CHECKS } from './model.ts';
+export { checksCsv } from './output/checks-csv.ts';
+export { cyclesCsv } from './output/cycles-csv.ts';
+export { manifestJson } from './output/manifest-json.ts';
+export { resultsCsv } from './output/results-csv.ts';
+export { summary } from './output/summary/summary.ts';
+export { version } from './output/version.ts';
+export { type OutputFile, writeFiles } from './output/write-files.ts';
+export { screen } from './verdict/screen.ts';

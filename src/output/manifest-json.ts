@@ -1,0 +1,57 @@
+import { createHash } from 'node:crypto';
+import type { Result } from '../model.ts';
+import { version } from './version.ts';
+import type { OutputFile } from './write-files.ts';
+
+/**
+ * manifest.json: what made the results and from what: version, hash of every input, settings in force,
+ * passes of each run, and the files written with their hashes. It names no time and no place, so the
+ * same job gives the same bytes.
+ *
+ * @param files the files that are written with it
+ */
+export function manifestJson(result: Result, files: readonly OutputFile[]): string {
+  const { job } = result;
+  const manifest = {
+    program: 'daystrain',
+    version,
+    title: job.title,
+    units: job.units,
+    inputs: job.inputs,
+    settings: settings(result),
+    runs: result.runs.map((run) => ({
+      run: run.run.id,
+      passes: run.passes,
+      settled: !run.walks,
+      covered_hours: run.coveredHours,
+      years: run.years,
+    })),
+    files: files.map(({ name, content }) => ({ name, sha256: sha256(content) })),
+  };
+  return `${JSON.stringify(manifest, null, 2)}\n`;
+}
+
+function settings({ job }: Result) {
+  const { limits, counting } = job;
+  return {
+    design_life_years: limits.designLife,
+    damage: limits.damage,
+    load_factor: limits.loadFactor,
+    member_factor: limits.memberFactor,
+    fastener_factor: limits.fastenerFactor,
+    static_factor: limits.staticFactor,
+    residue: counting.residue,
+    force_gate_N: counting.forceGate,
+    stress_gate_MPa: counting.stressGate,
+    represents_years: job.represents,
+    extremes: job.extremes.map(({ name, temperatures }) => ({
+      name,
+      degC: Object.fromEntries(temperatures),
+    })),
+    defaults: job.defaults,
+  };
+}
+
+function sha256(content: string | Uint8Array): string {
+  return createHash('sha256').update(content).digest('hex');
+}

@@ -1,0 +1,38 @@
+import type { Result } from '../../model.ts';
+import { grouped, shortNumber } from '../number-text.ts';
+import { runNames } from './names.ts';
+import { wrap } from './text-layout.ts';
+
+/** The record's span and step, the days that it covers, the years that it stands for, and the passes. */
+export function recordLines({ job, runs }: Result): string[] {
+  const { times, stepHours } = job.axis;
+  const first = stamp(times[0]);
+  const last = stamp(times[times.length - 1]);
+  const span = `Record: ${grouped(times.length)} samples, ${first} to ${last}, every ${shortNumber(stepHours)} h.`;
+  const covered = groupedRuns(
+    runs.map((run) => [run.run.id, `${shortNumber(run.coveredHours / 24)} days`]),
+  );
+  const years = groupedRuns(runs.map((run) => [run.run.id, yearsText(run.years)]));
+  const passes = groupedRuns(runs.map((run) => [run.run.id, String(run.passes)]));
+  return [
+    wrap(`${span} It covers ${covered} and stands for ${years}.`),
+    wrap(`Passes through it until no slip changed: ${passes}.`),
+  ];
+}
+
+/** The time as the record's own clock shows it, without seconds. */
+export function stamp(time: number): string {
+  return new Date(time).toISOString().slice(0, 16).replace('T', ' ');
+}
+
+function yearsText(years: number): string {
+  return years === 1 ? '1 year' : `${shortNumber(years)} years`;
+}
+
+/** What the runs have, once where all have the same: `2 (R1, R2), 3 (R3)`. */
+function groupedRuns(pairs: readonly [id: string, text: string][]): string {
+  const groups = new Map<string, string[]>();
+  for (const [id, text] of pairs) groups.set(text, [...(groups.get(text) ?? []), id]);
+  if (groups.size === 1) return pairs[0][1];
+  return [...groups].map(([text, ids]) => `${text} (${runNames(ids, pairs.length)})`).join(', ');
+}

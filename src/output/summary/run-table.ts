@@ -1,0 +1,39 @@
+import type { Result, RunResult } from '../../model.ts';
+import type { UnitSystem } from '../../units.ts';
+import { shortNumber } from '../number-text.ts';
+import { amount, connectionName } from './names.ts';
+import { table } from './text-layout.ts';
+
+/** One line a run: verdict, what governs, where, and the shortest life of its connections. */
+export function runTable({ job, runs }: Result): string {
+  const header = ['run', 'connections', 'verdict', 'utilisation', 'governing check', 'at', 'life'];
+  return table([header, ...runs.map((run) => row(run, job.units))], [1, 3]);
+}
+
+/** True where any check of any of the run's connections fails. */
+export function fails(run: RunResult): boolean {
+  return run.connections.some((connection) => connection.verdict === 'fails');
+}
+
+function row(run: RunResult, units: UnitSystem): string[] {
+  const connection = run.connections[run.governing];
+  const { governing } = connection;
+  return [
+    run.run.id,
+    String(run.connections.length),
+    fails(run) ? 'FAILS' : 'ok',
+    governing?.utilisation == null ? '' : shortNumber(governing.utilisation),
+    governing?.check ?? 'nothing to check',
+    governing === null
+      ? ''
+      : `${connectionName(connection)}, ${amount(connection.position, 'length', units)}`,
+    life(run),
+  ];
+}
+
+function life(run: RunResult): string {
+  const lives = run.connections.map((c) => c.life).filter((years) => years !== null);
+  if (lives.length === 0) return 'no curve';
+  const shortest = Math.min(...lives);
+  return Number.isFinite(shortest) ? `${shortNumber(shortest)} years` : 'unlimited';
+}

@@ -1,0 +1,63 @@
+import type { Result } from '../../model.ts';
+import { shortNumber } from '../number-text.ts';
+import { unitOf } from '../quantity.ts';
+import { exempt, failures, notGiven } from './check-groups.ts';
+import { damageTable } from './damage-table.ts';
+import { connectionName } from './names.ts';
+import { CAUTION, defaults, notes, warnings } from './notes.ts';
+import { recordLines } from './record-lines.ts';
+import { fails, runTable } from './run-table.ts';
+import { wrap } from './text-layout.ts';
+
+/**
+ * The results for a person: the answer first, then each run, what failed, what was not given, damage,
+ * and what was left out or assumed.
+ *
+ * @returns text of at most 100 columns in the units of the job, with LF line ends
+ */
+export function summary(result: Result): string {
+  const { job } = result;
+  const life = shortNumber(job.limits.designLife);
+  const allowed = shortNumber(job.limits.damage);
+  const sections = [
+    [job.title, wrap(answer(result))].join('\n'),
+    runTable(result),
+    section('What fails', failures(result)),
+    section('Not given, so neither passed nor failed', notGiven(result)),
+    section('Not owed, by the rule on the shear range', exempt(result)),
+    section(`Damage in ${life} years (allowed ${allowed})`, [damageTable(result)]),
+    section('To bear in mind', notes(result)),
+    section('Warnings', warnings(result)),
+    section('Left at their defaults', defaults(result)),
+    [...recordLines(result), unitsLine(result), CAUTION].join('\n'),
+  ];
+  return `${sections.filter((text) => text !== '').join('\n\n')}\n`;
+}
+
+function answer(result: Result): string {
+  const { runs } = result;
+  const failing = runs.filter(fails).length;
+  const verdict =
+    failing === 0
+      ? `No check fails in ${runs.length === 1 ? 'the run' : `the ${runs.length} runs`}.`
+      : `${failing} of ${runs.length} ${runs.length === 1 ? 'run' : 'runs'} ${failing === 1 ? 'fails' : 'fail'}.`;
+  return `${verdict} ${governs(result)}`.trimEnd();
+}
+
+function governs({ runs, governing }: Result): string {
+  const run = runs[governing];
+  const connection = run.connections[run.governing];
+  const check = connection.governing;
+  if (check === null) return 'No limit was given for anything, so nothing was checked.';
+  return `${connectionName(connection)} governs: ${check.check} at ${shortNumber(check.utilisation!)} of its limit.`;
+}
+
+function unitsLine({ job: { units } }: Result): string {
+  const names = (['force', 'length', 'stress'] as const).map((q) => unitOf(q, units)).join(', ');
+  return `Units: ${units === 'SI' ? 'SI' : 'US customary'} (${names}).`;
+}
+
+function section(title: string, lines: readonly string[]): string {
+  const body = lines.filter((line) => line !== '');
+  return body.length === 0 ? '' : [title, ...body].join('\n');
+}
