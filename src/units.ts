@@ -20,50 +20,47 @@ export type Quantity =
 
 export type UnitSystem = 'SI' | 'US';
 
-/** A number in base units, or what was expected in place of the text. */
-export type Reading =
-  | { readonly value: number }
-  | { readonly expected: string; readonly hint?: string };
+/** A number in base units; `null` where the text is no such quantity, with what is known of why. */
+export interface Reading {
+  readonly value: number | null;
+  readonly hint?: string;
+}
 
 interface QuantityUnits {
   /** As it stands in a message. */
   readonly name: string;
   readonly base: string;
-  readonly example: string;
   readonly SI: string;
   readonly US: string;
 }
 
 const QUANTITIES: Record<Quantity, QuantityUnits> = {
-  length: { name: 'a length', base: 'mm', example: '600 mm', SI: 'mm', US: 'in' },
-  area: { name: 'an area', base: 'mm^2', example: '450 mm^2', SI: 'mm^2', US: 'in^2' },
+  length: { name: 'a length', base: 'mm', SI: 'mm', US: 'in' },
+  area: { name: 'an area', base: 'mm^2', SI: 'mm^2', US: 'in^2' },
   'second moment of area': {
     name: 'a second moment of area',
     base: 'mm^4',
-    example: '16000 mm^4',
     SI: 'mm^4',
     US: 'in^4',
   },
-  force: { name: 'a force', base: 'N', example: '5 kN', SI: 'kN', US: 'kip' },
-  stress: { name: 'a stress', base: 'MPa', example: '80 MPa', SI: 'MPa', US: 'ksi' },
-  stiffness: { name: 'a stiffness', base: 'N/mm', example: '2 kN/mm', SI: 'kN/mm', US: 'kip/in' },
+  force: { name: 'a force', base: 'N', SI: 'kN', US: 'kip' },
+  stress: { name: 'a stress', base: 'MPa', SI: 'MPa', US: 'ksi' },
+  stiffness: { name: 'a stiffness', base: 'N/mm', SI: 'kN/mm', US: 'kip/in' },
   expansion: {
     name: 'an expansion',
     base: 'K^-1',
-    example: '23e-6 / K',
     SI: 'K^-1',
     US: 'degF^-1',
   },
-  temperature: { name: 'a temperature', base: 'K', example: '21 degC', SI: 'degC', US: 'degF' },
+  temperature: { name: 'a temperature', base: 'K', SI: 'degC', US: 'degF' },
   'temperature difference': {
     name: 'a temperature difference',
     base: 'K',
-    example: '5 K',
     SI: 'K',
     US: 'degF',
   },
-  years: { name: 'a time', base: 'year', example: '50 years', SI: 'year', US: 'year' },
-  hours: { name: 'a time', base: 'h', example: '3 h', SI: 'h', US: 'h' },
+  years: { name: 'a time', base: 'year', SI: 'year', US: 'year' },
+  hours: { name: 'a time', base: 'h', SI: 'h', US: 'h' },
 };
 
 /** What each temperature scale reads at 0 °C. */
@@ -76,24 +73,40 @@ const ICE_POINT: Readonly<Record<string, number>> = { degC: 0, K: 273.15, degF: 
  * @param text the user's text
  * @param quantity what it must measure
  * @param columnUnit unit in the column's header, which may hold a power of ten, such as `1e-6/K`
- * @returns the value in base units (a temperature in °C), or what was expected
+ * @returns the value in base units (a temperature in °C), or `null`
  */
 export function readQuantity(text: string, quantity: Quantity, columnUnit?: string): Reading {
-  const expected = `${QUANTITIES[quantity].name} with its unit, such as ${QUANTITIES[quantity].example}`;
   const { number, unit } = split(text);
-  if (number === null) return { expected, ...commaHint(text) };
-  if (!Number.isFinite(number)) return { expected: 'a number that is not so large' };
+  if (number === null) return { value: null, ...commaHint(text) };
   const slip = SLIPS.find(([wrong]) => wrong.test(unit === '' ? (columnUnit ?? '') : unit));
-  if (slip !== undefined) return { expected, hint: slip[1] };
-  if (unit !== '') return converted(number, unit, quantity, expected);
-  if (columnUnit === undefined) return { expected };
-  const scale = split(columnUnit);
-  return converted(number * (scale.number ?? 1), scale.unit, quantity, expected);
+  if (slip !== undefined) return { value: null, hint: slip[1] };
+  const unitText = unit === '' ? columnUnit : unit;
+  if (unitText === undefined || /^\d/.test(unit)) return { value: null };
+  const value = converter(unitText, quantity)?.(number) ?? null;
+  return { value: value !== null && Number.isFinite(value) ? value : null };
 }
 
-/** True where the text is a unit that measures the quantity: `mm`, `kN/mm`, `1e-6/K`. */
-export function isUnitOf(text: string, quantity: Quantity): boolean {
-  return 'value' in readQuantity('0', quantity, text);
+/**
+ * How bare numbers in a unit turn into a quantity's base unit; `null` where it is no unit of the quantity.
+ * Reads many numbers far faster than `readQuantity` does.
+ */
+export function converter(unit: string, quantity: Quantity): ((value: number) => number) | null {
+  const scale = split(unit);
+  const size = sizeOf(scale.unit, quantity);
+  if (size === null) return null;
+  const factor = scale.number ?? 1;
+  const zero = quantity === 'temperature' ? ICE_POINT[scale.unit] : 0;
+  return (value) => (value * factor - zero) * size;
+}
+
+/** The quantity as it stands in a message, `a length`. */
+export function quantityName(quantity: Quantity): string {
+  return QUANTITIES[quantity].name;
+}
+
+/** The quantity's base unit as a user may write it, `mm`. */
+export function baseUnit(quantity: Quantity): string {
+  return quantity === 'temperature' ? 'degC' : QUANTITIES[quantity].base;
 }
 
 /**
@@ -102,7 +115,7 @@ export function isUnitOf(text: string, quantity: Quantity): boolean {
  */
 export function quantityOf<Q extends Quantity>(text: string, among: readonly Q[]): Q | null {
   const { unit } = split(text);
-  return among.find((quantity) => unit !== '' && isUnitOf(unit, quantity)) ?? null;
+  return among.find((quantity) => unit !== '' && converter(unit, quantity) !== null) ?? null;
 }
 
 /** Reads a number without a unit, such as `1.35`, `1e4` or `60 %` (0.6); `null` where it is none. */
@@ -177,13 +190,6 @@ function commaHint(text: string): { hint?: string } {
   return /\d,\d/.test(text) ? { hint: 'Write numbers with a point and no comma: 1250.5.' } : {};
 }
 
-function converted(value: number, unit: string, quantity: Quantity, expected: string): Reading {
-  const size = sizeOf(unit, quantity);
-  if (size === null) return { expected };
-  if (quantity !== 'temperature') return { value: value * size };
-  return { value: (value - ICE_POINT[unit]) * size };
-}
-
 const sizes = new Map<string, number | null>();
 
 /** Size of one unit in the quantity's base unit; `null` where it does not measure the quantity. */
@@ -198,7 +204,7 @@ function sizeOf(unit: string, quantity: Quantity): number | null {
 }
 
 function computeSize(unit: string, quantity: Quantity): number | null {
-  if (quantity === 'temperature' && !(unit in ICE_POINT)) return null;
+  if (quantity === 'temperature' && !Object.hasOwn(ICE_POINT, unit)) return null;
   // A lone temperature unit carries its zero; times a length it is a difference.
   const difference = quantity === 'temperature' || quantity === 'temperature difference';
   const times = difference ? ' m' : '';

@@ -1,0 +1,92 @@
+import { stat } from 'node:fs/promises';
+import { basename, dirname, join } from 'node:path';
+import { InputError, type Issue } from '../issue.ts';
+import type { Job } from '../model.ts';
+import { readCurveRows } from './curve-rows.ts';
+import { readCurves } from './curves.ts';
+import { readExtremes } from './extremes.ts';
+import { readFasteners } from './fasteners.ts';
+import { type Files, filesOf } from './files.ts';
+import type { Findings } from './findings.ts';
+import { JOB_KEYS } from './keys.ts';
+import { readMembers } from './members.ts';
+import { readKeys } from './read-keys.ts';
+import { readRecordBasis } from './record-basis.ts';
+import { readRuns } from './runs.ts';
+import { readCounting, readLimits } from './settings.ts';
+import { emptyMap, type Source, type SourceMap } from './source.ts';
+import { readTable } from './table.ts';
+import { readYaml } from './yaml.ts';
+import { readZones } from './zones.ts';
+
+/**
+ * Reads a job and all the files that it names.
+ *
+ * @param path the job file, or a folder that holds job.yaml
+ * @returns the job in base units
+ * @throws InputError with every issue of the job and its files
+ */
+export async function readJob(path: string): Promise<Job> {
+  const found = await stat(path).catch(() => null);
+  const jobFile = found?.isDirectory() ? join(path, 'job.yaml') : path;
+  const name = basename(jobFile);
+  const files = filesOf(dirname(jobFile));
+  const findings: Findings = { issues: [], defaults: [], warnings: [] };
+  const text = await files.read(name, { file: jobFile }, findings);
+  const map = text === null ? null : readYaml(text, name, findings);
+  const job = map === null ? null : await readWhole(map, files, findings);
+  if (job !== null && findings.issues.length === 0) return job;
+  throw new InputError(inFileOrder(findings.issues, files));
+}
+
+/** The job from its mapping; `null` with a fault, which is reported. */
+async function readWhole(map: SourceMap, files: Files, findings: Findings): Promise<Job | null> {
+  const { complete, values } = readKeys(JOB_KEYS, map, '', findings);
+  const part = (key: 'zones' | 'limits' | 'counting') => values[key] ?? emptyMap(map.place, key);
+  const table = async (source: Source | null | undefined) =>
+    source ? readTable(source, files, findings) : [];
+
+  const basis = values.record ? await readRecordBasis(values.record, files, findings) : null;
+  const zones = readZones(part('zones'), basis, findings);
+  const limits = readLimits(part('limits'), findings);
+  const counting = readCounting(part('counting'), findings);
+
+  const curveRows = await readCurveRows(values.curves ?? null, files, findings);
+  const curves = await readCurves(curveRows, findings);
+  const members = readMembers(await table(values.members), curves, findings);
+  const fasteners = readFasteners(await table(values.fasteners), curves, findings);
+
+  const clock = basis && { axis: basis.axis, offset: basis.record.offset };
+  const parts = { members, fasteners, zones, clock };
+  const runs = readRuns(await table(values.runs), parts, findings);
+  const extremes = readExtremes(await table(values.extremes), zones, runs, findings);
+
+  if (!complete || basis === null || limits === null || counting === null) return null;
+  return {
+    title: values.title,
+    units: values.units,
+    axis: basis.axis,
+    zones: [...zones.items.values()],
+    represents: basis.represents,
+    extremes,
+    limits,
+    counting,
+    curves: [...curves.items.values()],
+    runs,
+    inputs: files.inputs,
+    defaults: findings.defaults,
+    warnings: findings.warnings,
+  };
+}
+
+/** Issues by file in the order that the files were read, and by line and column within each. */
+function inFileOrder(issues: readonly Issue[], { inputs }: Files): Issue[] {
+  const order = new Map(inputs.map(({ name }, i) => [name, i]));
+  const rank = ({ place }: Issue) => order.get(place.file) ?? -1;
+  return issues.toSorted(
+    (a, b) =>
+      rank(a) - rank(b) ||
+      (a.place.line ?? 0) - (b.place.line ?? 0) ||
+      (a.place.column ?? 0) - (b.place.column ?? 0),
+  );
+}

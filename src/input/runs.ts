@@ -1,0 +1,127 @@
+import type { Run } from '../model.ts';
+import { isInGap } from '../temperature/gaps.ts';
+import { type Findings, report } from './findings.ts';
+import { RUN_KEYS } from './keys.ts';
+import { lookUp, uniqueIds } from './library.ts';
+import { lockInOf, lockInTime, structureOf } from './lock-in.ts';
+import { readKeys } from './read-keys.ts';
+import { rolesOf } from './run-fasteners.ts';
+import type { Clock, RunParts } from './run-parts.ts';
+import { givenText, givenValue, placeOf, type SourceMap } from './source.ts';
+import type { Values } from './values.ts';
+import { WARNINGS } from './warnings.ts';
+
+/** The job's runs in file order; a run with a fault is reported and left out. */
+export function readRuns(rows: readonly SourceMap[], parts: RunParts, findings: Findings): Run[] {
+  const ids = uniqueIds(rows, 'run', findings);
+  checkCase(ids, rows, findings);
+  return rows.map((row) => readRun(row, parts, findings)).filter((run) => run !== null);
+}
+
+type RunValues = Values<typeof RUN_KEYS>;
+
+function readRun(row: SourceMap, parts: RunParts, findings: Findings): Run | null {
+  const prefix = `runs ${givenText(row, 'id') ?? '?'}: `;
+  const { complete, values } = readKeys(RUN_KEYS, row, prefix, findings);
+  const before = findings.issues.length;
+  const member = lookUp(parts.members, row, 'member', findings);
+  const zone = lookUp(parts.zones, row, 'zone', findings);
+  const fixed = lookUp(parts.fasteners, row, 'fastener', findings);
+  const slotted = lookUp(parts.fasteners, row, 'slotted', findings);
+  const positions = positionsOf(values, row, findings);
+  checkFixed(values, positions, row, findings);
+  const time = lockInTime(values, row, parts.clock, findings);
+  const lockIn = lockInOf(values, zone, time, parts.clock);
+  const structure = structureOf(row, values, { ...parts, time, prefix }, findings);
+  if (!complete || findings.issues.length > before) return null;
+  if (!member || !zone || !fixed || !positions || lockIn === null) return null;
+  if (values.structure_zone !== null && structure === null) return null;
+  const roles = rolesOf(values.fixed, positions);
+  const fasteners = roles.map((role) => (role === 'fixed' ? fixed : slotted));
+  if (!fasteners.every((fastener) => fastener !== null)) return null;
+  const run: Run = {
+    id: values.id,
+    member,
+    positions,
+    roles,
+    fasteners,
+    zone,
+    lockIn,
+    structure,
+    overhang: values.overhang,
+    line: values.line,
+    gap: values.gap,
+    settingTolerance: values.setting_tolerance,
+    addedTension: values.added_tension,
+    addedShear: values.added_shear,
+  };
+  warnOfGap(run, time, parts.clock, findings);
+  return run;
+}
+
+/** A temperature read where the record has a long gap is a guess. */
+function warnOfGap(run: Run, time: number | null, clock: Clock | null, findings: Findings): void {
+  if (time === null || clock === null) return;
+  const zones = run.structure === null ? [run.zone] : [run.zone, run.structure.zone];
+  for (const zone of zones) {
+    if (!zone.constant && isInGap(zone, clock.axis, time)) {
+      findings.warnings.push(WARNINGS.lockInInGap(run.id, zone.name));
+    }
+  }
+}
+
+/** Ids stand in file names, and some file systems do not tell `r1` from `R1`. */
+function checkCase(ids: readonly string[], rows: readonly SourceMap[], findings: Findings): void {
+  const seen = new Map<string, string>();
+  for (const id of ids) {
+    const other = seen.get(id.toLowerCase());
+    const row = rows.find((one) => givenText(one, 'id') === id);
+    if (other !== undefined && row !== undefined) {
+      const expected = `a name that differs from ${other} by more than capitals`;
+      report(findings, placeOf(row, 'id'), { found: id, expected });
+    }
+    seen.set(id.toLowerCase(), id);
+  }
+}
+
+/** Positions of the fasteners [mm], from a count and a spacing or as given. */
+function positionsOf(
+  values: Partial<RunValues>,
+  row: SourceMap,
+  findings: Findings,
+): Float64Array | null {
+  const given = ['count', 'spacing', 'positions'].filter((key) => givenValue(row, key));
+  const lone = values.count === 1 && !given.includes('spacing');
+  if (
+    given.join() !== 'positions' &&
+    given.join() !== 'count,spacing' &&
+    !(lone && given.length === 1)
+  ) {
+    return report(findings, row.place, {
+      found: given.length === 0 ? 'neither' : given.join(' and '),
+      expected: 'either count and spacing, or positions',
+    });
+  }
+  if (values.positions) return Float64Array.from(values.positions);
+  const { count, spacing } = values;
+  if (count == null || spacing === undefined) return null;
+  return Float64Array.from({ length: count }, (_, i) => i * (spacing ?? 0));
+}
+
+function checkFixed(
+  { fixed }: Partial<RunValues>,
+  positions: Float64Array | null,
+  row: SourceMap,
+  findings: Findings,
+): void {
+  if (fixed === undefined || positions === null) return;
+  const n = positions.length;
+  const beyond = typeof fixed === 'string' ? [] : fixed.filter((number) => number > n);
+  if (beyond.length > 0) {
+    const expected = `fastener numbers from 1 to ${n}`;
+    report(findings, placeOf(row, 'fixed'), { found: beyond.join(' '), expected });
+  }
+  if (givenValue(row, 'slotted') || !rolesOf(fixed, positions).includes('slotted')) return;
+  const expected = 'the fastener that stands where not fixed, since not all are';
+  report(findings, placeOf(row, 'slotted'), { expected });
+}
