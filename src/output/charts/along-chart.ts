@@ -12,7 +12,7 @@ import { connectionName } from '../summary/names.ts';
 import type { Chart, Point } from './chart.ts';
 import type { DirectLabel } from './direct-labels.ts';
 import { roundTicks } from './log-ticks.ts';
-import { axis, baseOptions, COLOUR, DASH, type LineSet, line, spacer } from './theme.ts';
+import { axis, baseOptions, COLOUR, DASH, type LineSet, line, spacer, TICKS } from './theme.ts';
 
 /** With more fasteners than these, point shapes would run together. */
 const MOST_SHAPES = 80;
@@ -82,11 +82,11 @@ function subtitle({ run, connections }: RunResult): string {
 }
 
 /** The x scale: from end to end with a little room. */
-function reach(connections: readonly Connection[], job: Job): { min: number; max: number } {
+function reach(connections: readonly Connection[], job: Job) {
   const first = place(connections[0], job);
   const last = place(connections[connections.length - 1], job);
   const room = last > first ? (last - first) * 0.02 : Math.max(1, Math.abs(first) * 0.1);
-  return { min: first - room, max: last + room };
+  return { min: first - room, max: last + room, ticks: { ...TICKS, includeBounds: false } };
 }
 
 function place({ position }: Connection, job: Job): number {
@@ -119,7 +119,7 @@ function shearPanel(connections: readonly Connection[], job: Job): Panel {
       label(`shear range`, 'range', last, COLOUR.demand),
       ...(roles.length > 1 ? roles.map(({ role, points }) => nameOfRole(role, points)) : []),
       limit.data.length === 0
-        ? label('no limit given', 'range', { x: last.x, y: 0 }, COLOUR.faint)
+        ? NO_LIMIT
         : label('limit', 'range', limit.data[limit.data.length - 1], COLOUR.limit),
     ],
   };
@@ -157,9 +157,22 @@ function rolePoints(role: Role, data: Point[], connections: number): LineSet {
   });
 }
 
-/** Roles are named at their first point, where a run has both. */
+const NO_LIMIT: DirectLabel = {
+  text: 'no limit was given',
+  xAxis: 'x',
+  yAxis: 'range',
+  x: 'right',
+  y: 'top',
+  shift: [18, 8],
+  colour: COLOUR.faint,
+};
+
+/** Where a run has both roles: the fixed ones are named at their first point, the slotted at their last. */
 function nameOfRole(role: Role, points: readonly Point[]): DirectLabel {
-  return { text: role, xAxis: 'x', yAxis: 'range', ...points[0], side: 'right', shift: [8, -11] };
+  const axes = { xAxis: 'x', yAxis: 'range' };
+  return role === 'fixed'
+    ? { text: role, ...axes, ...points[0], side: 'right', shift: [8, -11] }
+    : { text: role, ...axes, ...points[points.length - 1], side: 'left', shift: [0, -14] };
 }
 
 function utilisationPanel(connections: readonly Connection[], job: Job) {
@@ -175,7 +188,7 @@ function utilisationPanel(connections: readonly Connection[], job: Job) {
   return {
     scale: logarithmic
       ? { type: 'logarithmic', min: LEAST, max: most * 1.3 }
-      : { min: 0, max: Math.max(1.15, most * 1.08) },
+      : { min: 0, suggestedMax: 1.1, grace: '8%' },
     ticks: logarithmic ? { use: roundTicks(LEAST, most * 1.3) } : {},
     sets: [
       line(

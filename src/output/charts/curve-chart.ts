@@ -4,6 +4,7 @@ import { connectionName } from '../summary/names.ts';
 import type { Chart } from './chart.ts';
 import { type CurvePanel, curvePanel } from './curve-panel.ts';
 import { type CurvePart, curveParts } from './curve-part.ts';
+import type { FixedTicks } from './fixed-ticks.ts';
 import { decadeTicks, roundTicks } from './log-ticks.ts';
 import { axis, baseOptions, spacer } from './theme.ts';
 
@@ -30,6 +31,7 @@ export function curveChart(result: RunResult, job: Job): Chart {
           fixedTicks: {
             axes: {
               cycles: decadeTicks(...cycles),
+              share: shareTicks(mostShare(parts)),
               ...Object.fromEntries(
                 panels.map(({ part, ranges }) => [part, roundTicks(...ranges)]),
               ),
@@ -39,20 +41,14 @@ export function curveChart(result: RunResult, job: Job): Chart {
         },
         scales: {
           ...rangeAxes(panels),
-          cycles: axis(`Cycles in ${years(job)}; cycles to failure of the curve`, {
+          cycles: axis(cyclesTitle(withCurve, job), {
             ...ACROSS,
             type: 'logarithmic',
             min: cycles[0],
             max: cycles[1],
             stackWeight: 10,
           }),
-          between: { ...spacer(0.5), ...ACROSS },
-          share: axis('Share of the damage [%]', {
-            ...ACROSS,
-            min: 0,
-            max: mostShare(parts),
-            stackWeight: 4,
-          }),
+          ...(withCurve.length === 0 ? {} : shareAxes(mostShare(parts))),
         },
       },
     },
@@ -60,6 +56,35 @@ export function curveChart(result: RunResult, job: Job): Chart {
 }
 
 const ACROSS = { axis: 'x', position: 'bottom', stack: 'across' } as const;
+
+const shareAxes = (max: number) => ({
+  between: { ...spacer(0.5), ...ACROSS },
+  share: axis('Share of the damage [%]', {
+    ...ACROSS,
+    min: 0,
+    max,
+    stackWeight: 4,
+  }),
+});
+
+/** Whole tens of per cent, to over the largest share. */
+function mostShare(parts: readonly CurvePart[]): number {
+  const largest = Math.max(0.05, ...parts.flatMap(({ bins }) => bins.map(({ share }) => share)));
+  return Math.min(100, 10 * Math.ceil(10 * largest * 1.05));
+}
+
+function shareTicks(most: number): FixedTicks {
+  const step = most > 50 ? 20 : 10;
+  return Array.from({ length: Math.floor(most / step) + 1 }, (_, i) => ({
+    value: i * step,
+    label: String(i * step),
+  }));
+}
+
+function cyclesTitle(withCurve: readonly CurvePart[], job: Job): string {
+  const counted = `Cycles in ${years(job)}`;
+  return withCurve.length === 0 ? counted : `${counted}; of the curve: cycles to failure`;
+}
 
 /** One above the other; the library stacks them from the last one down. */
 function rangeAxes(panels: readonly CurvePanel[]) {
@@ -87,11 +112,6 @@ function cyclesReach(panels: readonly CurvePanel[]): [number, number] {
   if (xs.length === 0) return [1, 1e6];
   const least = Math.max(0.1, Math.min(...xs));
   return [10 ** Math.floor(Math.log10(least)), 10 ** Math.ceil(Math.log10(Math.max(...xs)))];
-}
-
-function mostShare(parts: readonly CurvePart[]): number {
-  const shares = parts.flatMap(({ bins }) => bins.map(({ share }) => share));
-  return Math.min(100, 110 * Math.max(0.1, ...shares));
 }
 
 function title(result: RunResult, parts: readonly CurvePart[], job: Job): string {

@@ -52,12 +52,14 @@ export function curvePanel(part: CurvePart, job: Job): CurvePanel {
   };
 }
 
-/** From under the smallest to over the largest of the counted ranges and the curve's last two points. */
+/** From under the smallest to over the largest of the counted ranges and the curve's last points, with room for its name. */
 function rangesOf({ bins, curve }: CurvePart): [number, number] {
   const known = curve?.line.kind === 'points' ? [...curve.line.ranges].slice(-2) : [];
   const limit = curve === null ? [] : [curve.limitRange];
   const all = [...bins.map(({ range }) => range), ...known, ...limit].filter((range) => range > 0);
-  return all.length === 0 ? [1, 10] : [Math.min(...all) / 1.6, Math.max(...all) * 1.6];
+  if (all.length === 0) return [1, 10];
+  const [least, most] = [Math.min(...all) / 1.6, Math.max(...all)];
+  return [least, most * Math.max(3, (most / least) ** 0.3)];
 }
 
 function curvePoints(
@@ -93,7 +95,7 @@ function shareBar({ part }: CurvePart, { share }: PartBin, y: number): LineSet {
 }
 
 function labelsOf(part: CurvePart): DirectLabel[] {
-  const { bins, curve, damage } = part;
+  const { bins, curve } = part;
   const corner: DirectLabel = {
     text: `${part.part}: ${curve === null ? 'no curve was given' : `curve ${curve.id}`}`,
     xAxis: 'cycles',
@@ -111,18 +113,14 @@ function labelsOf(part: CurvePart): DirectLabel[] {
     bold: false,
     colour: COLOUR.faint,
   };
-  const nothing = curve === null ? 'damage is not judged' : 'no damage';
   const none: DirectLabel = {
     ...factor,
-    text: nothing,
+    text: 'no damage',
     xAxis: 'share',
     x: 'left',
     side: 'right',
     shift: [10, 16],
   };
-  return [
-    corner,
-    ...(curve === null ? [] : [factor]),
-    ...(bins.some(isHarmful) && damage.sum !== null ? [] : [none]),
-  ];
+  if (curve === null) return [corner];
+  return bins.some(isHarmful) ? [corner, factor] : [corner, factor, none];
 }

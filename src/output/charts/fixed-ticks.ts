@@ -11,6 +11,7 @@ export const fixedTicks: Plugin = {
     for (const [id, ticks] of Object.entries(axes as Record<string, FixedTicks>)) {
       const scale = chart.config.options?.scales?.[id];
       if (scale === undefined) continue;
+      scale.ticks = { ...scale.ticks, autoSkip: false };
       scale.afterBuildTicks = (axis) => {
         axis.ticks = ticks.map(({ value }) => ({ value }));
       };

@@ -146,6 +146,13 @@ function forcePanel(
   return {
     title: `${panel.name} [${force}]`,
     sets: [
+      line(
+        [
+          { x: points[0].x, y: 0 },
+          { x: points[points.length - 1].x, y: 0 },
+        ],
+        { label: 'zero', yAxisID: panel.axis, borderWidth: 1, borderColor: COLOUR.faint },
+      ),
       line(points, {
         label: panel.name,
         yAxisID: panel.axis,

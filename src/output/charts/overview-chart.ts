@@ -1,6 +1,5 @@
 import type { Result, RunResult } from '../../model.ts';
 import { shortNumber } from '../number-text.ts';
-import { connectionName } from '../summary/names.ts';
 import { fails } from '../summary/run-table.ts';
 import type { Chart } from './chart.ts';
 import type { DirectLabel } from './direct-labels.ts';
@@ -33,7 +32,7 @@ export function overviewChart(result: Result): Chart {
               y: shown.map(({ run }, i) => ({ value: i, label: clipped(run.id) })),
             },
           },
-          directLabels: { labels: [...headings(), ...shown.map(rowLabel)] },
+          directLabels: { labels: [...HEADINGS, ...shown.flatMap(rowLabels)] },
         },
         scales: {
           x: axis('Utilisation: demand / limit, logarithmic', {
@@ -129,50 +128,50 @@ function dots(runs: readonly RunResult[]): LineSet[] {
   ];
 }
 
-function headings(): DirectLabel[] {
-  return [
-    {
-      text: 'limit',
-      xAxis: 'x',
-      yAxis: 'y',
-      x: 1,
-      y: 'top',
-      side: 'middle',
-      shift: [0, -9],
-      colour: COLOUR.limit,
-    },
-    {
-      text: 'governing check',
-      xAxis: 'x',
-      yAxis: 'y',
-      x: 'right',
-      y: 'top',
-      shift: [90, -9],
-      colour: COLOUR.faint,
-    },
-  ];
-}
-
-function rowLabel(run: RunResult, y: number): DirectLabel {
-  const connection = run.connections[run.governing];
-  const { governing } = connection;
-  const failing = fails(run);
-  const text =
-    governing === null
-      ? 'nothing to check'
-      : `${shortNumber(governing.utilisation ?? 0)}   ${governing.check}, ${connectionName(connection)}${failing ? ', fails' : ''}`;
-  return {
-    text,
+const HEADINGS: readonly DirectLabel[] = [
+  {
+    text: 'limit',
+    xAxis: 'x',
+    yAxis: 'y',
+    x: 1,
+    y: 'top',
+    side: 'middle',
+    shift: [0, -9],
+    colour: COLOUR.limit,
+  },
+  {
+    text: 'governing check',
     xAxis: 'x',
     yAxis: 'y',
     x: 'right',
-    y,
-    shift: [16, 0],
-    bold: failing,
-    colour: failing ? COLOUR.limit : COLOUR.ink,
-  };
+    y: 'top',
+    shift: [84, -9],
+    colour: COLOUR.faint,
+  },
+];
+
+/** The utilisation in figures, and beside it the check and connection that it belongs to. */
+function rowLabels(run: RunResult, y: number): DirectLabel[] {
+  const connection = run.connections[run.governing];
+  const { governing } = connection;
+  const failing = fails(run);
+  const look = { xAxis: 'x', yAxis: 'y', x: 'right', y, bold: failing } as const;
+  const colour = failing ? COLOUR.limit : COLOUR.ink;
+  if (governing === null) return [{ ...look, text: 'nothing to check', shift: [84, 0], colour }];
+  const where = `${clipped(connection.run)}/${connection.number}`;
+  const name = `${governing.check}, ${where}${failing ? ', fails' : ''}`;
+  return [
+    {
+      ...look,
+      text: shortNumber(governing.utilisation ?? 0),
+      side: 'left',
+      shift: [68, 0],
+      colour,
+    },
+    { ...look, text: name, shift: [84, 0], colour },
+  ];
 }
 
 function clipped(id: string): string {
-  return id.length > 20 ? `${id.slice(0, 19)}…` : id;
+  return id.length > 14 ? `${id.slice(0, 13)}…` : id;
 }

@@ -50,6 +50,8 @@ export function baseOptions(
   };
 }
 
+export const TICKS = { color: COLOUR.ink, font: { family: FONT, size: 14 }, maxRotation: 0 };
+
 /** A scale's look: a thin grid, plain numbers, and a title that names the quantity and its unit. */
 export function axis(title: string, more: Record<string, unknown> = {}) {
   return {
@@ -62,7 +64,7 @@ export function axis(title: string, more: Record<string, unknown> = {}) {
     },
     grid: { color: COLOUR.grid, tickLength: 4 },
     border: { color: COLOUR.faint },
-    ticks: { color: COLOUR.ink, font: { family: FONT, size: 14 }, maxRotation: 0 },
+    ticks: TICKS,
     ...more,
   };
 }
@@ -88,6 +90,8 @@ export function line(data: Point[], look: Partial<LineSet>): LineSet {
     borderColor: COLOUR.demand,
     backgroundColor: COLOUR.demand,
     pointRadius: 0,
+    // Point shapes on an axis stay whole; lines may not run out of their panel.
+    clip: look.showLine === false || look.pointRadius ? 10 : 0,
     ...look,
   };
 }

@@ -21,8 +21,8 @@ function row(run: RunResult, units: UnitSystem): string[] {
   return [
     run.run.id,
     String(run.connections.length),
-    fails(run) ? 'FAILS' : 'ok',
-    governing?.utilisation == null ? '' : shortNumber(governing.utilisation),
+    fails(run) ? 'fails' : 'ok',
+    governing?.utilisation == null ? '' : governing.utilisation.toFixed(2),
     governing?.check ?? 'nothing to check',
     governing === null
       ? ''

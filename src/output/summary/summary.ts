@@ -20,7 +20,7 @@ export function summary(result: Result): string {
   const life = shortNumber(job.limits.designLife);
   const allowed = shortNumber(job.limits.damage);
   const sections = [
-    [job.title, wrap(answer(result))].join('\n'),
+    [job.title, '', wrap(answer(result))].join('\n'),
     runTable(result),
     section('What fails', failures(result)),
     section('Not given, so neither passed nor failed', notGiven(result)),
@@ -49,7 +49,7 @@ function governs({ runs, governing }: Result): string {
   const connection = run.connections[run.governing];
   const check = connection.governing;
   if (check === null) return 'No limit was given for anything, so nothing was checked.';
-  return `${connectionName(connection)} governs: ${check.check} at ${shortNumber(check.utilisation!)} of its limit.`;
+  return `${connectionName(connection)} governs: ${check.check} is ${shortNumber(check.utilisation ?? 0)} times its limit.`;
 }
 
 function unitsLine({ job: { units } }: Result): string {
