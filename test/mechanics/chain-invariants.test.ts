@@ -5,6 +5,7 @@ import {
   chainAfter,
   difference,
   forcesOf,
+  row,
   slipsOf,
   spanForcesOf,
 } from '../support/chain-reading.ts';
@@ -161,6 +162,31 @@ describe('a run with slip, whatever the run and the path', () => {
       SEED,
     );
   });
+
+  // Equal grips on both sides of mid-run: the row slides as a whole and only symmetry says where it stands.
+  it.each([2000, 2e7, Number.POSITIVE_INFINITY])(
+    'a symmetric row of joints of %d N/mm stays symmetric',
+    (k) => {
+      const count = fc.integer({ min: 1, max: 10 });
+      const play = fc.integer({ min: 1, max: 40 });
+      fc.assert(
+        fc.property(count, play, strainPath, (half, twentieths, path) => {
+          const n = 2 * half;
+          const spec = row({
+            axialStiffness: 3e7,
+            spacing: 600,
+            stiffness: new Array(n).fill(k),
+            freePlay: new Array(n).fill(twentieths / 20),
+            grip: new Array(n).fill(1000),
+          });
+          const forces = forcesOf(chainAfter(spec, ...path), n);
+          const mirrored = forces.map((_, i) => -forces[n - 1 - i]);
+          expect(difference(forces, mirrored)).toBeLessThan(1e-3);
+        }),
+        SEED,
+      );
+    },
+  );
 
   it('begins anew after a reset', () => {
     fc.assert(
