@@ -277,7 +277,7 @@ export interface Damage {
   readonly cycles: number;
   /** Cycles that do damage, n_d. */
   readonly damagingCycles: number;
-  /** Unfactored range S with N(γS) = n_d/D; `null` where D is 0 or there is no curve. */
+  /** Unfactored range S with N(γS) = n_d/D [N of one fastener, or MPa of the member]; `null` where D is 0 or there is no curve. */
   readonly equivalentRange: number | null;
   /** Slope m of the curve at the factored equivalent range; `null` with it. */
   readonly slope: number | null;
@@ -354,7 +354,7 @@ export interface RunResult {
   readonly connections: readonly Connection[];
   /** Index into `connections` of the one whose governing check is largest. */
   readonly governing: number;
-  /** Largest and smallest span force in the counted pass, each over all spans [N]; zero without a span. */
+  /** Largest magnitude of a span force in the counted pass, over all spans [N]; zero without a span. */
   readonly largestSpanForce: number;
   /** Of the governing connection. */
   readonly fastenerBins: readonly RangeBin[];

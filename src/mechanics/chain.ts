@@ -46,6 +46,7 @@ export function moveTo(chain: Chain, strain: number, sink: RowSink | null = null
     if (step !== 0) {
       remaining = first < 0 ? 0 : remaining - step;
       advance(chain, step);
+      if (first >= 0) landOnLimit(chain, first, direction);
       now[STRAIN] = strain - remaining;
       now[MARK] = leg + 1 - remaining / whole;
       if (sink !== null) sink.take(chain);
@@ -55,7 +56,7 @@ export function moveTo(chain: Chain, strain: number, sink: RowSink | null = null
       // Taking all joints at their limits at once settles nearly always at the first try. Should it ever go round in
       // circles, the one of the lowest number alone does not: Murty's least-index rule for a P-matrix problem.
       idle++;
-      turnJoints(chain, first, direction, idle > 2 * chain.count + 8);
+      turnJoints(chain, direction, idle > 2 * chain.count + 8 ? first : -1);
       solveRates(chain);
     }
   }
@@ -122,12 +123,20 @@ function advance(chain: Chain, step: number): void {
   for (let i = 0; i < count; i++) movement[i] += rate[i] * step;
 }
 
-/** Changes the mode of joint `first` and, unless `alone`, of every other one at its limit and moving outward. */
-function turnJoints(chain: Chain, first: number, direction: number, alone: boolean): void {
+/** Puts joint `first` exactly on the limit that the way led to, where rounding left it beside it. */
+function landOnLimit(chain: Chain, first: number, direction: number): void {
+  const up = chain.rate[first] * direction > 0;
+  chain.movement[first] = up ? chain.upper[first] : chain.lower[first];
+}
+
+/** Changes the mode of every joint that is at its limit and moving outward, or of joint `only` alone. */
+function turnJoints(chain: Chain, direction: number, only: number): void {
   const { count, movement, rate, lower, upper, nearness } = chain;
-  for (let i = alone ? first : 0; i < (alone ? first + 1 : count); i++) {
+  const end = only < 0 ? count : only + 1;
+  for (let i = Math.max(only, 0); i < end; i++) {
     const up = rate[i] * direction;
-    const room = up > 0 ? upper[i] - movement[i] : movement[i] - lower[i];
-    if ((room <= nearness[i] && up !== 0) || i === first) changeMode(chain, i, up > 0 ? 1 : -1);
+    if (up > 0) {
+      if (upper[i] - movement[i] <= nearness[i]) changeMode(chain, i, 1);
+    } else if (up < 0 && movement[i] - lower[i] <= nearness[i]) changeMode(chain, i, -1);
   }
 }

@@ -2,6 +2,7 @@ import type { Residue } from '../model.ts';
 import { bookSlides, type Chain, moveTo, readSlips, resetChain } from './chain.ts';
 import { clearEnvelope, cover, createEnvelope, type Envelope, widen } from './envelope.ts';
 import { RowSink } from './row-sink.ts';
+import { spanForces } from './span-forces.ts';
 import { FROM_LOCK_IN, legToExtreme, type StrainPath } from './strain-path.ts';
 
 /** What counts the cycles of a pass. It sees each pass from the second on; the last one stands. */
@@ -89,7 +90,7 @@ class Follower {
   private readonly path: StrainPath;
   private readonly counter: PassCounter;
   private readonly sink: RowSink;
-  private readonly spanForces: Float64Array;
+  private readonly spans: Float64Array;
   private readonly countedShear: Envelope;
   private readonly countedSpans: Envelope;
   private readonly allShear: Envelope;
@@ -105,7 +106,7 @@ class Follower {
     this.path = path;
     this.counter = counter;
     this.sink = new RowSink(count, (sink) => this.takeBlock(sink));
-    this.spanForces = new Float64Array(this.sink.capacity * (count - 1));
+    this.spans = new Float64Array(this.sink.capacity * (count - 1));
     this.countedShear = createEnvelope(count);
     this.countedSpans = createEnvelope(count - 1);
     this.allShear = createEnvelope(count);
@@ -187,20 +188,9 @@ class Follower {
   }
 
   private takeBlock({ values, marks, rows }: RowSink): void {
-    sumSpans(values, this.spanForces, this.chain.count, rows);
+    spanForces(values, this.spans, this.chain.count, rows);
     widen(this.counting ? this.countedShear : this.allShear, values, marks, rows);
-    widen(this.counting ? this.countedSpans : this.allSpans, this.spanForces, marks, rows);
-    if (this.counting) this.counter.take(values, this.spanForces, rows);
-  }
-}
-
-/** Span forces of each row: N to the right of a fastener is the sum of the shears up to it. */
-function sumSpans(shears: Float64Array, spans: Float64Array, count: number, rows: number): void {
-  for (let r = 0; r < rows; r++) {
-    let force = 0;
-    for (let i = 0; i < count - 1; i++) {
-      force += shears[r * count + i];
-      spans[r * (count - 1) + i] = force;
-    }
+    widen(this.counting ? this.countedSpans : this.allSpans, this.spans, marks, rows);
+    if (this.counting) this.counter.take(values, this.spans, rows);
   }
 }

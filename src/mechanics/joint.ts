@@ -85,7 +85,8 @@ function stopSlip(chain: Chain, i: number, bears: boolean): void {
   chain.offset[i] = offset;
   const grip = chain.grip[i];
   chain.nearness[i] = (NEAR * grip) / k;
-  chain.upper[i] = bears && up === SLIPS_UP ? Number.POSITIVE_INFINITY : (grip + hardened - offset) / k;
+  chain.upper[i] =
+    bears && up === SLIPS_UP ? Number.POSITIVE_INFINITY : (grip + hardened - offset) / k;
   chain.lower[i] =
     bears && up === SLIPS_DOWN ? Number.NEGATIVE_INFINITY : (-grip + hardened - offset) / k;
 }

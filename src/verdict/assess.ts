@@ -1,0 +1,118 @@
+import type { DamageTables } from '../damage/damage-table.ts';
+import { rangeBins } from '../damage/range-bins.ts';
+import type { Chain } from '../mechanics/chain.ts';
+import { followRecord } from '../mechanics/history.ts';
+import { strainPath } from '../mechanics/strain-path.ts';
+import { traceConnection } from '../mechanics/trace.ts';
+import type { Connection, Job, Run, RunResult, Trace } from '../model.ts';
+import { coveredHours, yearsOf } from '../temperature/gaps.ts';
+import { assessConnection, fastenerSpectrum, fastenerUse } from './connection.ts';
+import { momentText } from './moment-text.ts';
+import { createPassCounters } from './pass-counters.ts';
+import { runChain, runExtremes, runStrain } from './run-chain.ts';
+import type { RunScene } from './run-scene.ts';
+import { assessSpan, memberUse, type SpanLoad, spanSpectrum, worseSpan } from './span-load.ts';
+
+/** A force under this share of EA times the largest strain is rounding. */
+const NOISE = 1e-9;
+
+/**
+ * Takes one run through mechanics, counting, damage and checks.
+ *
+ * @param run the run
+ * @param job limits, counting settings, extremes and the record's axis
+ * @param tables damage tables shared by all runs of the job
+ */
+export function assessRun(run: Run, job: Job, tables: DamageTables): RunResult {
+  const chain = runChain(run);
+  const strain = runStrain(run);
+  const path = strainPath(strain);
+  const extremes = runExtremes(run, job.extremes);
+  const counters = createPassCounters(chain.count, run.member.curve?.compressionShare ?? 1);
+  const options = {
+    extremes: extremes.map((extreme) => extreme.strain),
+    residue: job.counting.residue,
+  };
+  const history = followRecord(chain, path, options, counters);
+  const zones = run.structure === null ? [run.zone] : [run.zone, run.structure.zone];
+  const hours = coveredHours(job.axis, zones);
+  const strains = [...options.extremes, ...Array.from(path.turns, (turn) => strain[turn])];
+  const scene: RunScene = {
+    run,
+    job,
+    tables,
+    history,
+    counters,
+    years: yearsOf(hours, job.represents),
+    noise: NOISE * chain.axialStiffness * strains.reduce((m, e) => Math.max(m, Math.abs(e)), 0),
+    when: (mark) => momentText(path, mark, job.axis.times, extremes),
+  };
+
+  const spans = counters.spans.map((_, j) => assessSpan(scene, j));
+  const connections = run.roles.map((_, i) => assessConnection(scene, spans, i));
+  const governing = governingConnection(connections);
+  return {
+    run,
+    passes: history.passes,
+    walks: history.walks,
+    driftPerYear: history.walks ? largest(history.drift) / scene.years : 0,
+    years: scene.years,
+    coveredHours: hours,
+    connections,
+    governing,
+    largestSpanForce: Math.max(
+      largest(history.countedSpans.max),
+      largest(history.countedSpans.min),
+    ),
+    ...binsOf(scene, spans, governing),
+    trace: traceOf(chain, strain, scene, spans, governing),
+  };
+}
+
+/** Index of the connection with the largest governing utilisation; of the largest shear range where none has one. */
+function governingConnection(connections: readonly Connection[]): number {
+  const rank = ({ governing, shearRange }: Connection) => [
+    governing?.utilisation ?? -1,
+    shearRange,
+  ];
+  let most = 0;
+  for (let i = 1; i < connections.length; i++) {
+    const [use, range] = rank(connections[i]);
+    const [mostUse, mostRange] = rank(connections[most]);
+    if (use > mostUse || (use === mostUse && range > mostRange)) most = i;
+  }
+  return most;
+}
+
+function binsOf(
+  scene: RunScene,
+  spans: readonly SpanLoad[],
+  i: number,
+): Pick<RunResult, 'fastenerBins' | 'memberBins'> {
+  const span = worseSpan(spans, i);
+  return {
+    fastenerBins: rangeBins(fastenerSpectrum(scene, i), fastenerUse(scene, i)),
+    memberBins: span === null ? [] : rangeBins(spanSpectrum(scene, span.index), memberUse(scene)),
+  };
+}
+
+function traceOf(
+  chain: Chain,
+  strain: Float64Array,
+  scene: RunScene,
+  spans: readonly SpanLoad[],
+  i: number,
+): Trace {
+  const { shear, spanForce, slip } = traceConnection(
+    chain,
+    strain,
+    i,
+    worseSpan(spans, i)?.index ?? -1,
+  );
+  const { perConnection } = scene.run.fasteners[i];
+  return { shear: shear.map((f) => f / perConnection), spanForce, slip };
+}
+
+function largest(values: Float64Array): number {
+  return values.reduce((most, value) => Math.max(most, Math.abs(value)), 0);
+}

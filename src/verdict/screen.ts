@@ -1,0 +1,15 @@
+import { createDamageTables } from '../damage/damage-table.ts';
+import type { Job, Result } from '../model.ts';
+import { assessRun } from './assess.ts';
+
+/**
+ * Screens every run of a job: mechanics, counting, damage, checks and verdicts. The library's main call.
+ *
+ * @param job a job in base units, as `readJob` gives it or put together by hand
+ */
+export function screen(job: Job): Result {
+  const tables = createDamageTables();
+  const runs = job.runs.map((run) => assessRun(run, job, tables));
+  const use = runs.map((run) => run.connections[run.governing].governing?.utilisation ?? -1);
+  return { job, runs, governing: use.indexOf(Math.max(...use)) };
+}
