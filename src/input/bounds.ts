@@ -11,15 +11,11 @@ export function isWithin(value: number, key: Key): boolean {
   );
 }
 
-/** The key's bounds as they end a sentence: ` over 0 mm and up to 100000000 mm`. */
-export function boundsText(key: Key, unit: string): string {
+/** The bounds that the value is beyond, as they end a sentence: ` over 0 mm`. */
+export function boundsText(value: number, key: Key, unit: string): string {
   const { over, from, to, under } = key;
-  const figure = (value: number) => (unit === '' ? `${value}` : `${value} ${unit}`);
-  const parts = [
-    over === undefined ? '' : `over ${figure(over)}`,
-    from === undefined ? '' : `not under ${figure(from)}`,
-    to === undefined ? '' : `not over ${figure(to)}`,
-    under === undefined ? '' : `under ${figure(under)}`,
-  ].filter((part) => part !== '');
-  return parts.length === 0 ? '' : ` ${parts.join(' and ')}`;
+  const figure = (bound: number) => (unit === '' ? `${bound}` : `${bound} ${unit}`);
+  const low = (over !== undefined && value <= over) || (from !== undefined && value < from);
+  if (low) return over === undefined ? ` not under ${figure(from ?? 0)}` : ` over ${figure(over)}`;
+  return under === undefined ? ` not over ${figure(to ?? 0)}` : ` under ${figure(under)}`;
 }

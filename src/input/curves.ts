@@ -27,7 +27,7 @@ export async function readCurves(
   const items = new Map<string, Curve>();
   for (const row of rows) {
     const curve = row.points === 'faulty' ? null : await readCurve(row, findings);
-    if (curve !== null) items.set(curve.id, curve);
+    if (curve !== null && !items.has(curve.id)) items.set(curve.id, curve);
   }
   return { noun: 'curve', ids, items };
 }

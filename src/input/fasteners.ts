@@ -17,7 +17,7 @@ export function readFasteners(
   const items = new Map<string, Fastener>();
   for (const row of rows) {
     const fastener = readFastener(row, curves, findings);
-    if (fastener !== null) items.set(fastener.id, fastener);
+    if (fastener !== null && !items.has(fastener.id)) items.set(fastener.id, fastener);
   }
   return { noun: 'fastener', ids, items };
 }

@@ -55,6 +55,7 @@ function decode(bytes: Buffer, name: string, findings: Findings): string | null 
     return new TextDecoder('utf-8', { fatal: true }).decode(bytes);
   } catch {
     const hint = 'Save the file again as UTF-8.';
-    return report(findings, { file: name }, { expected: 'text in UTF-8', hint });
+    const found = 'bytes of another encoding';
+    return report(findings, { file: name }, { found, expected: 'text in UTF-8', hint });
   }
 }

@@ -1,20 +1,20 @@
 import { stat } from 'node:fs/promises';
 import { basename, dirname, join } from 'node:path';
-import { InputError, type Issue } from '../issue.ts';
+import { InputError, type Issue, wordIssue } from '../issue.ts';
 import type { Job } from '../model.ts';
 import { readCurveRows } from './curve-rows.ts';
 import { readCurves } from './curves.ts';
 import { readExtremes } from './extremes.ts';
 import { readFasteners } from './fasteners.ts';
 import { type Files, filesOf } from './files.ts';
-import type { Findings } from './findings.ts';
+import { type Findings, report } from './findings.ts';
 import { JOB_KEYS } from './keys.ts';
 import { readMembers } from './members.ts';
 import { readKeys } from './read-keys.ts';
 import { readRecordBasis } from './record-basis.ts';
 import { readRuns } from './runs.ts';
 import { readCounting, readLimits } from './settings.ts';
-import { emptyMap, type Source, type SourceMap } from './source.ts';
+import { emptyMap, placeOf, type Source, type SourceMap } from './source.ts';
 import { readTable } from './table.ts';
 import { readYaml } from './yaml.ts';
 import { readZones } from './zones.ts';
@@ -59,6 +59,9 @@ async function readWhole(map: SourceMap, files: Files, findings: Findings): Prom
   const clock = basis && { axis: basis.axis, offset: basis.record.offset };
   const parts = { members, fasteners, zones, clock };
   const runs = readRuns(await table(values.runs), parts, findings);
+  if (runs.length === 0 && findings.issues.length === 0) {
+    report(findings, placeOf(map, 'runs'), { found: 'none', expected: 'at least one run' });
+  }
   const extremes = readExtremes(await table(values.extremes), zones, runs, findings);
 
   if (!complete || basis === null || limits === null || counting === null) return null;
@@ -79,11 +82,13 @@ async function readWhole(map: SourceMap, files: Files, findings: Findings): Prom
   };
 }
 
-/** Issues by file in the order that the files were read, and by line and column within each. */
+/** Issues, each once, by file in the order that the files were read, and by line and column within each. */
 function inFileOrder(issues: readonly Issue[], { inputs }: Files): Issue[] {
   const order = new Map(inputs.map(({ name }, i) => [name, i]));
   const rank = ({ place }: Issue) => order.get(place.file) ?? -1;
-  return issues.toSorted(
+  // A column's header is one fault, however many rows there are below it.
+  const distinct = new Map(issues.map((issue) => [wordIssue(issue), issue]));
+  return [...distinct.values()].sort(
     (a, b) =>
       rank(a) - rank(b) ||
       (a.place.line ?? 0) - (b.place.line ?? 0) ||

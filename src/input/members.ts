@@ -17,7 +17,7 @@ export function readMembers(
   const items = new Map<string, Member>();
   for (const row of rows) {
     const member = readMember(row, curves, findings);
-    if (member !== null) items.set(member.id, member);
+    if (member !== null && !items.has(member.id)) items.set(member.id, member);
   }
   return { noun: 'member', ids, items };
 }

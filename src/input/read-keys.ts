@@ -30,9 +30,12 @@ export function readKeys<T extends KeyTable>(
   const schema = schemaOf(table);
   const whole = schema.safeParse(given);
   if (whole.success) return { complete: true, values: withNulls(table, whole.data) };
-  for (const issue of whole.error.issues) reportIssue(issue, table, map, findings);
+  const { issues } = whole.error;
+  const unknown = issues.flatMap((issue) => (issue.code === 'unrecognized_keys' ? issue.keys : []));
+  const meant = unknown.map((name) => reportUnknown(name, table, map, findings));
+  for (const issue of issues) reportIssue(issue, table, map, { findings, meant });
   const sound = Object.entries(table).filter(([name, key]) => {
-    const faulty = whole.error.issues.some(({ path }) => path[0] === name);
+    const faulty = issues.some(({ path }) => path[0] === name);
     return !faulty && (given[name] !== undefined || !key.required);
   });
   const part = Object.fromEntries(sound.map(([name]) => [name, given[name]]));
@@ -101,39 +104,47 @@ function withNulls<T extends KeyTable>(table: T, values: Record<string, unknown>
 
 type SchemaIssue = NonNullable<ReturnType<Schema['safeParse']>['error']>['issues'][number];
 
+interface Report {
+  readonly findings: Findings;
+  /** Keys that an unknown one was likely meant to be: not missed a second time. */
+  readonly meant: readonly (string | undefined)[];
+}
+
 function reportIssue(
   issue: SchemaIssue,
   table: KeyTable,
   map: SourceMap,
-  findings: Findings,
+  { findings, meant }: Report,
 ): void {
-  if (issue.code === 'unrecognized_keys') {
-    for (const key of issue.keys) reportUnknown(key, table, map, findings);
-    return;
-  }
+  if (issue.code === 'unrecognized_keys') return;
   const name = String(issue.path[0]);
   const faults = issue.code === 'custom' ? (issue.params?.faults as readonly Fault[]) : undefined;
+  if (faults === undefined && !meant.includes(name)) {
+    report(findings, placeOf(map, name), { expected: wanted(table[name]) });
+  }
   for (const { place, ...fault } of faults ?? []) {
     report(findings, place ?? placeOf(map, name), fault);
   }
-  if (faults === undefined) reportMissing(name, table[name], map, findings);
 }
 
-function reportUnknown(name: string, table: KeyTable, map: SourceMap, findings: Findings): void {
+/** Reports an unknown key and gives the known one that was likely meant. */
+function reportUnknown(
+  name: string,
+  table: KeyTable,
+  map: SourceMap,
+  findings: Findings,
+): string | undefined {
   const place = map.entries.get(name)?.place ?? map.place;
   const nearest = nearestName(name, Object.keys(table));
-  const known = Object.keys(table).filter((key) => !map.entries.has(key));
+  const free = Object.keys(table).filter((key) => !map.entries.has(key));
   report(findings, place, {
     found: name,
-    expected: `one of ${known.join(', ')}`,
+    expected: free.length === 0 ? 'no further key' : `one of ${free.join(', ')}`,
     ...(nearest === undefined ? {} : { nearest }),
     // In «{ area: 1,250 mm^2 }» the comma ends the value, and what follows it reads as a key.
-    ...(/^\d/.test(name)
-      ? { hint: 'Inside braces a comma ends the value: write numbers without one.' }
-      : {}),
+    ...(/^\d/.test(name) ? { hint: COMMA_HINT } : {}),
   });
+  return nearest;
 }
 
-function reportMissing(name: string, key: Key, map: SourceMap, findings: Findings): void {
-  report(findings, placeOf(map, name), { expected: wanted(key) });
-}
+const COMMA_HINT = 'Inside braces a comma ends the value: write numbers without one.';

@@ -92,7 +92,7 @@ interface Measure {
 
 function bounded(value: number, typed: string, key: Key, measure: Measure): Outcome<number> {
   if (isWithin(value, key)) return { value };
-  const bounds = boundsText(key, measure.unit);
+  const bounds = boundsText(value, key, measure.unit);
   return fault(typed, `${measure.name}${bounds}, such as ${key.example}`);
 }
 

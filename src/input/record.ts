@@ -101,7 +101,7 @@ function readTimes(
 ): Pick<RecordTable, 'times' | 'offset'> {
   const times = new Float64Array(rows.length);
   let offset: number | null | undefined;
-  let latest = Number.NEGATIVE_INFINITY;
+  let previous = Number.NEGATIVE_INFINITY;
   for (let i = 0; i < rows.length; i++) {
     const text = (rows[i].cells[column.index] ?? '').trim();
     const time = readIsoTime(text);
@@ -115,9 +115,9 @@ function readTimes(
     if ((offset === null) !== (time.offset === null)) fault('offset');
     // On a clock that keeps the first row's offset, summer time or not.
     times[i] = time.local - (time.offset ?? 0) + (offset ?? 0);
-    if (times[i] === latest) fault('twice');
-    if (times[i] < latest) fault('earlier');
-    latest = Math.max(latest, times[i]);
+    if (times[i] === previous) fault('twice');
+    if (times[i] < previous) fault('earlier');
+    previous = times[i];
   }
   return { times, offset: offset ?? null };
 }
