@@ -1,8 +1,16 @@
 import { stat } from 'node:fs/promises';
 import { basename, dirname, join, resolve } from 'node:path';
+import { readJob } from '../input/job.ts';
 import type { Result } from '../model.ts';
 import type { ChartChoice } from '../output/charts/choose-charts.ts';
-import type { OutputFile } from '../output/write-files.ts';
+import { checksCsv } from '../output/checks-csv.ts';
+import { cyclesCsv } from '../output/cycles-csv.ts';
+import { manifestJson } from '../output/manifest-json.ts';
+import { resultsCsv } from '../output/results-csv.ts';
+import { runFails } from '../output/run-fails.ts';
+import { summary } from '../output/summary/summary.ts';
+import { MANIFEST, type OutputFile, writeFiles } from '../output/write-files.ts';
+import { screen } from '../verdict/screen.ts';
 
 export interface ScreenOptions {
   /** Folder for the results; by default one under `reports/` with the job's name. */
@@ -28,18 +36,15 @@ export async function screenCommand(
   jobPath: string,
   options: ScreenOptions,
 ): Promise<CommandOutcome> {
-  const { readJob } = await import('../input/job.ts');
-  const { screen } = await import('../verdict/screen.ts');
-  const { summary } = await import('../output/summary/summary.ts');
   const job = await readJob(jobPath);
   const result = screen(job);
   const text = summary(result);
   const directory = options.out ?? (await defaultDirectory(jobPath));
   const files = await write(result, text, directory, options.charts);
   return {
-    lines: [text, `Written to ${directory}: ${files.join(', ')}`],
+    lines: [text, `Results in ${directory}: ${filesText(files)}`],
     warnings: job.warnings,
-    fails: result.runs.some((run) => run.connections.some(({ verdict }) => verdict === 'fails')),
+    fails: result.runs.some(runFails),
   };
 }
 
@@ -49,11 +54,6 @@ async function write(
   directory: string,
   charts: ChartChoice,
 ): Promise<string[]> {
-  const { resultsCsv } = await import('../output/results-csv.ts');
-  const { checksCsv } = await import('../output/checks-csv.ts');
-  const { cyclesCsv } = await import('../output/cycles-csv.ts');
-  const { manifestJson } = await import('../output/manifest-json.ts');
-  const { MANIFEST, writeFiles } = await import('../output/write-files.ts');
   const files: OutputFile[] = [
     { name: 'summary.txt', content: text },
     { name: 'results.csv', content: resultsCsv(result) },
@@ -65,6 +65,16 @@ async function write(
   return [...files.map((file) => file.name), MANIFEST];
 }
 
+/** Tables by name, charts by number. */
+function filesText(files: readonly string[]): string {
+  const charts = files.filter((name) => name.endsWith('.png')).length;
+  const named = files.filter((name) => !name.endsWith('.png'));
+  return [...named, ...(charts === 0 ? [] : [charts === 1 ? '1 chart' : `${charts} charts`])].join(
+    ', ',
+  );
+}
+
+/** The canvas is loaded only where charts are wanted. */
 async function drawCharts(result: Result, choice: ChartChoice): Promise<OutputFile[]> {
   if (choice === 'none') return [];
   const { chooseCharts } = await import('../output/charts/choose-charts.ts');
@@ -77,6 +87,7 @@ async function defaultDirectory(jobPath: string): Promise<string> {
   const path = resolve(jobPath);
   if ((await stat(path)).isDirectory()) return join('reports', basename(path));
   const folder = basename(dirname(path));
-  const job = basename(path).replace(/\.(ya?ml|json)$/i, '');
-  return join('reports', job === 'job' ? folder : `${folder}-${job}`);
+  const name = basename(path);
+  const own = `${folder}-${name.replace(/\.[^.]*$/, '')}`;
+  return join('reports', name === 'job.yaml' ? folder : own);
 }

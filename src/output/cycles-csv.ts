@@ -40,7 +40,7 @@ function runRows(result: RunResult, units: UnitSystem): string[][] {
       cellNumber(inUnits(bin.to, quantity, units)),
       unitOf(quantity, units),
       cellNumber(bin.count),
-      cellNumber(bin.cyclesToFailure),
+      cellNumber(bin.cyclesToFailure, 'unlimited'),
       cellNumber(bin.damage),
     ]);
   const fastenerCurve = connection.fastener.curve?.id ?? '';

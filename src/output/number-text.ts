@@ -1,29 +1,34 @@
 /**
  * The number for a CSV cell: up to 8 significant digits, no trailing zeros, plain digits down to 1e-6.
  *
- * @param value any number; `null` is blank and `Infinity` is `unlimited`
+ * @param value any number; `null` is blank
+ * @param endless what stands for `Infinity`
  */
-export function cellNumber(value: number | null): string {
+export function cellNumber(value: number | null, endless = 'infinite'): string {
   if (value === null) return '';
-  return rounded(value, 8);
+  return value === Number.POSITIVE_INFINITY ? endless : rounded(value, 8);
 }
 
 /**
  * The number for a person to read: up to 3 significant digits, whole from 1,000 on.
  *
- * @param value any number; `Infinity` is `unlimited`
+ * @param value any number; `Infinity` is `infinite`
  */
 export function shortNumber(value: number): string {
   return Math.abs(value) >= 999.5 ? grouped(Math.round(value)) : rounded(value, 3);
 }
 
-/** The whole number with a comma between thousands. */
+/** The number with a comma between thousands. */
 export function grouped(value: number): string {
-  return Number.isFinite(value) ? value.toLocaleString('en-GB') : rounded(value, 3);
+  if (!Number.isFinite(value)) return rounded(value, 3);
+  // The language's own formatter takes longer to load than a run to screen.
+  const [whole, part] = String(value).split('.');
+  const thousands = whole.replace(/\B(?=(\d{3})+$)/g, ',');
+  return part === undefined ? thousands : `${thousands}.${part}`;
 }
 
 function rounded(value: number, digits: number): string {
-  if (value === Number.POSITIVE_INFINITY) return 'unlimited';
+  if (value === Number.POSITIVE_INFINITY) return 'infinite';
   // Adding zero turns −0 into 0.
   return String(Number(value.toPrecision(digits)) + 0);
 }

@@ -56,7 +56,7 @@ const COLUMNS: readonly Column[] = [
     value: (c) => c.memberDamage.equivalentRange,
   },
   { name: 'member_damage_per_year', value: (c) => c.memberDamagePerYear },
-  { name: 'life [years]', value: (c) => c.life },
+  { name: 'life [years]', value: (c) => cellNumber(c.life, 'unlimited') },
   { name: 'slip_peak', quantity: 'length', value: (c) => c.slipPeak },
   { name: 'sliding_per_year', quantity: 'length', value: (c) => c.slidingPerYear },
   { name: 'buckling_utilisation', value: (c) => c.bucklingUtilisation },

@@ -14,7 +14,13 @@ test('a cell has an exponent only where plain digits would not do', () => {
 });
 
 test('zero, nothing and no end have their own cells', () => {
-  expect([0, -0, null, Infinity].map(cellNumber)).toEqual(['0', '0', '', 'unlimited']);
+  expect([0, -0, null, Infinity].map((value) => cellNumber(value))).toEqual([
+    '0',
+    '0',
+    '',
+    'infinite',
+  ]);
+  expect(cellNumber(Infinity, 'unlimited')).toBe('unlimited');
 });
 
 test('a number to read has 3 significant digits, and commas from 1,000 on', () => {

@@ -84,3 +84,27 @@ test('with no limit for anything it says that nothing was checked', () => {
   expect(text).toContain('so nothing was checked');
   expect(text).toMatch(/peak shear +R1/);
 });
+
+test('alike defaults stand together', () => {
+  const result = makeResult();
+  const defaults = [
+    { key: 'units', value: 'SI' },
+    { key: 'limits.damage', value: '1.0' },
+    { key: 'limits.load_factor', value: '1.0' },
+    ...['R1', 'R2'].flatMap((id) => [
+      { key: `runs ${id}: overhang`, value: '0 mm' },
+      { key: `runs ${id}: added_shear`, value: '0 N' },
+    ]),
+    { key: 'fasteners M12 slot: per_connection', value: '1' },
+  ];
+  const text = summary({ ...result, job: { ...result.job, defaults } });
+  expect(text).toContain(
+    [
+      'Left at their defaults',
+      '  - units SI',
+      '  - limits: damage 1.0, load_factor 1.0',
+      '  - runs R1, R2: overhang 0 mm, added_shear 0 N',
+      '  - fasteners M12 slot: per_connection 1',
+    ].join('\n'),
+  );
+});

@@ -6,9 +6,9 @@ import {
   type Role,
   type RunResult,
 } from '../../model.ts';
+import { connectionName } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
 import { inUnits, unitOf } from '../quantity.ts';
-import { connectionName } from '../summary/names.ts';
 import type { Chart, Point } from './chart.ts';
 import type { DirectLabel } from './direct-labels.ts';
 import { roundTicks } from './log-ticks.ts';
@@ -28,7 +28,7 @@ export function alongChart(result: RunResult, job: Job): Chart {
   const { run, connections } = result;
   const rangePanel = shearPanel(connections, job);
   const usePanel = utilisationPanel(connections, job);
-  const base = baseOptions(title(result), subtitle(result), { right: 240 });
+  const base = baseOptions(title(result), subtitle(result), { right: 256 });
   const length = unitOf('length', job.units);
   return {
     name: `${run.id}-along`,
@@ -180,16 +180,22 @@ function utilisationPanel(connections: readonly Connection[], job: Job) {
     const points = connections.flatMap((connection) => usePoint(connection, name, job));
     return points.length === 0 ? [] : [{ name, look: LOOKS[i], points }];
   });
-  const most = Math.max(1, ...checks.flatMap(({ points }) => points.map(({ y }) => y)));
+  const all = checks.flatMap(({ points }) => points.map(({ y }) => y));
+  const most = Math.max(1, ...all.filter(Number.isFinite));
+  const top = most * 1.3;
   const logarithmic = most > MOST_LINEAR;
   const shapes = connections.length <= MOST_SHAPES;
   const { min, max } = reach(connections, job);
-  const drawn = ({ x, y }: Point): Point => ({ x, y: logarithmic ? Math.max(y, LEAST) : y });
+  // An infinite utilisation is drawn at the top, and a small one at the foot of a logarithmic scale.
+  const drawn = ({ x, y }: Point): Point => ({
+    x,
+    y: Math.min(top, logarithmic ? Math.max(y, LEAST) : y),
+  });
   return {
     scale: logarithmic
-      ? { type: 'logarithmic', min: LEAST, max: most * 1.3 }
+      ? { type: 'logarithmic', min: LEAST, max: top }
       : { min: 0, suggestedMax: 1.1, grace: '8%' },
-    ticks: logarithmic ? { use: roundTicks(LEAST, most * 1.3) } : {},
+    ticks: logarithmic ? { use: roundTicks(LEAST, top) } : {},
     sets: [
       line(
         [

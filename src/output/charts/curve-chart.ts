@@ -1,6 +1,6 @@
 import type { Job, RunResult } from '../../model.ts';
+import { connectionName } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
-import { connectionName } from '../summary/names.ts';
 import type { Chart } from './chart.ts';
 import { type CurvePanel, curvePanel } from './curve-panel.ts';
 import { type CurvePart, curveParts } from './curve-part.ts';

@@ -91,7 +91,7 @@ function shareBar({ part }: CurvePart, { share }: PartBin, y: number): LineSet {
     { x: 0, y },
     { x: 100 * share, y },
   ];
-  return line(ends, { xAxisID: 'share', yAxisID: part, label: 'share of damage', borderWidth: 7 });
+  return line(ends, { xAxisID: 'share', yAxisID: part, label: 'share of damage', borderWidth: 3 });
 }
 
 function labelsOf(part: CurvePart): DirectLabel[] {

@@ -1,8 +1,7 @@
 import type { Job, RunResult, Zone } from '../../model.ts';
+import { amount, connectionName, stamp } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
 import { inUnits, unitOf } from '../quantity.ts';
-import { amount, connectionName } from '../summary/names.ts';
-import { stamp } from '../summary/record-lines.ts';
 import type { Chart, Point } from './chart.ts';
 import { decimate } from './decimate.ts';
 import type { DirectLabel } from './direct-labels.ts';

@@ -1,6 +1,6 @@
 import type { Result, RunResult } from '../../model.ts';
 import { shortNumber } from '../number-text.ts';
-import { fails } from '../summary/run-table.ts';
+import { runFails } from '../run-fails.ts';
 import type { Chart } from './chart.ts';
 import type { DirectLabel } from './direct-labels.ts';
 import { roundTicks } from './log-ticks.ts';
@@ -15,13 +15,14 @@ const LEAST = 0.01;
 /** All runs of a job: the largest utilisation of each against the limit, and the check that governs it. */
 export function overviewChart(result: Result): Chart {
   const shown = shownRuns(result.runs);
-  const most = Math.max(2, ...shown.map((run) => utilisation(run) ?? 0)) * 1.2;
+  const most =
+    1.2 * Math.max(2, ...shown.map((run) => utilisation(run) ?? 0).filter(Number.isFinite));
   const base = baseOptions(title(result), subtitle(result, shown.length), { right: 390 });
   return {
     name: 'overview',
     configuration: {
       type: 'line',
-      data: { datasets: [limitLine(shown.length), ...stems(shown), ...dots(shown)] },
+      data: { datasets: [limitLine(shown.length), ...stems(shown, most), ...dots(shown, most)] },
       options: {
         ...base,
         plugins: {
@@ -63,7 +64,7 @@ function utilisation({ connections, governing }: RunResult): number | null {
 }
 
 function title({ runs, governing }: Result): string {
-  const failing = runs.filter(fails).length;
+  const failing = runs.filter(runFails).length;
   const verdict =
     failing === 0
       ? 'No run fails'
@@ -89,25 +90,30 @@ function limitLine(rows: number): LineSet {
   );
 }
 
+/** Where a utilisation is drawn: at the edge where it lies beyond the scale. */
+function drawn(use: number, most: number): number {
+  return Math.min(Math.max(use, LEAST), most);
+}
+
 /** From the limit to each run's point: how far it is from failing, or past it. */
-function stems(runs: readonly RunResult[]): LineSet[] {
+function stems(runs: readonly RunResult[], most: number): LineSet[] {
   return runs.flatMap((run, y) => {
     const use = utilisation(run);
     if (use === null) return [];
     const ends = [
       { x: 1, y },
-      { x: Math.max(use, LEAST), y },
+      { x: drawn(use, most), y },
     ];
-    const borderColor = fails(run) ? COLOUR.limit : COLOUR.demand;
-    return [line(ends, { borderColor, borderWidth: fails(run) ? 4 : 1.5 })];
+    const borderColor = runFails(run) ? COLOUR.limit : COLOUR.demand;
+    return [line(ends, { borderColor, borderWidth: runFails(run) ? 4 : 1.5 })];
   });
 }
 
-function dots(runs: readonly RunResult[]): LineSet[] {
+function dots(runs: readonly RunResult[], most: number): LineSet[] {
   const points = (failing: boolean) =>
     runs.flatMap((run, y) => {
       const use = utilisation(run);
-      return use === null || fails(run) !== failing ? [] : [{ x: Math.max(use, LEAST), y }];
+      return use === null || runFails(run) !== failing ? [] : [{ x: drawn(use, most), y }];
     });
   const look = { showLine: false, pointRadius: 7, pointBorderWidth: 2 };
   return [
@@ -154,7 +160,7 @@ const HEADINGS: readonly DirectLabel[] = [
 function rowLabels(run: RunResult, y: number): DirectLabel[] {
   const connection = run.connections[run.governing];
   const { governing } = connection;
-  const failing = fails(run);
+  const failing = runFails(run);
   const look = { xAxis: 'x', yAxis: 'y', x: 'right', y, bold: failing } as const;
   const colour = failing ? COLOUR.limit : COLOUR.ink;
   if (governing === null) return [{ ...look, text: 'nothing to check', shift: [84, 0], colour }];

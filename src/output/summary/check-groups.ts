@@ -8,15 +8,15 @@ import {
   type RunResult,
 } from '../../model.ts';
 import type { UnitSystem } from '../../units.ts';
+import { amount, connectionNames, runNames } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
 import { quantityOf } from '../quantity.ts';
-import { amount, connectionNames, runNames } from './names.ts';
-import { fails } from './run-table.ts';
+import { runFails } from '../run-fails.ts';
 import { wrap } from './text-layout.ts';
 
 /** Each failing check of each run: the worst demand, its limit, and the connections that fail. */
 export function failures({ job, runs }: Result): string[] {
-  return runs.filter(fails).flatMap((run) =>
+  return runs.filter(runFails).flatMap((run) =>
     CHECKS.flatMap((name) => {
       const failing = having(run, name, 'fail');
       return failing.length === 0 ? [] : [failure(failing, name, job.units)];

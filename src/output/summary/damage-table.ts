@@ -1,7 +1,7 @@
 import type { Connection, Damage, Result, RunResult } from '../../model.ts';
+import { amount, connectionName } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
 import type { Written } from '../quantity.ts';
-import { amount, connectionName } from './names.ts';
 import { table } from './text-layout.ts';
 
 /**
@@ -41,7 +41,10 @@ export function damageTable({ job, runs }: Result): string {
       ];
     }),
   );
-  return rows.length === 0 ? '' : table([header, ...rows], [3, 4, 5, 6]);
+  if (rows.length === 0) return '';
+  const ratio =
+    '  Range ratio: the damage as a factor on ranges, (damage / allowed)^(1 / slope of the curve).';
+  return `${table([header, ...rows], [3, 4, 5, 6])}\n${ratio}`;
 }
 
 interface Part {

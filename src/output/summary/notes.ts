@@ -1,7 +1,7 @@
-import type { Damage, Result } from '../../model.ts';
+import type { Result } from '../../model.ts';
+import { amount } from '../names.ts';
 import { grouped, shortNumber } from '../number-text.ts';
-import { amount } from './names.ts';
-import { wrap } from './text-layout.ts';
+import { bullet, wrap } from './text-layout.ts';
 
 /** Under this many covered days a record is not called a whole year. */
 const WHOLE_YEAR_DAYS = 350;
@@ -19,11 +19,6 @@ export function notes(result: Result): string[] {
   return points.map(bullet);
 }
 
-/** Every value that the job left at its default. */
-export function defaults({ job }: Result): string[] {
-  return job.defaults.map(({ key, value }) => bullet(`${key}: ${value}`));
-}
-
 /** What reading the job warned of. */
 export function warnings({ job }: Result): string[] {
   return job.warnings.map(bullet);
@@ -32,10 +27,6 @@ export function warnings({ job }: Result): string[] {
 export const CAUTION = wrap(
   'This is a screening. The code in force where the structure stands and a licensed engineer decide.',
 );
-
-function bullet(text: string): string {
-  return wrap(text, '  - ', 4);
-}
 
 function walking({ job, runs }: Result): string[] {
   return runs
@@ -60,12 +51,15 @@ function record({ job, runs }: Result): string[] {
 }
 
 function gated({ runs }: Result): string[] {
-  const all: Damage[] = runs.flatMap((run) =>
-    run.connections.flatMap((c) => [c.fastenerDamage, c.memberDamage]),
-  );
-  const cycles = Math.max(...all.map((damage) => damage.gatedCycles));
+  let cycles = 0;
+  let damage = 0;
+  for (const { connections } of runs) {
+    for (const { fastenerDamage, memberDamage } of connections) {
+      cycles = Math.max(cycles, fastenerDamage.gatedCycles, memberDamage.gatedCycles);
+      damage = Math.max(damage, fastenerDamage.gatedDamage, memberDamage.gatedDamage);
+    }
+  }
   if (cycles === 0) return [];
-  const damage = Math.max(...all.map((one) => one.gatedDamage));
   return [
     `The gate dropped up to ${grouped(cycles)} cycles of a series. They would have added at most ${shortNumber(damage)} to a damage sum of the record.`,
   ];

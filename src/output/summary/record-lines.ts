@@ -1,6 +1,6 @@
 import type { Result } from '../../model.ts';
+import { runNames, stamp } from '../names.ts';
 import { grouped, shortNumber } from '../number-text.ts';
-import { runNames } from './names.ts';
 import { wrap } from './text-layout.ts';
 
 /** The record's span and step, the days that it covers, the years that it stands for, and the passes. */
@@ -18,11 +18,6 @@ export function recordLines({ job, runs }: Result): string[] {
     wrap(`${span} It covers ${covered} and stands for ${years}.`),
     wrap(`Passes through it until no slip changed: ${passes}.`),
   ];
-}
-
-/** The time as the record's own clock shows it, without seconds. */
-export function stamp(time: number): string {
-  return new Date(time).toISOString().slice(0, 16).replace('T', ' ');
 }
 
 function yearsText(years: number): string {

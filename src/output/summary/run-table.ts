@@ -1,18 +1,22 @@
 import type { Result, RunResult } from '../../model.ts';
 import type { UnitSystem } from '../../units.ts';
+import { amount, connectionName } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
-import { amount, connectionName } from './names.ts';
+import { runFails } from '../run-fails.ts';
 import { table } from './text-layout.ts';
 
 /** One line a run: verdict, what governs, where, and the shortest life of its connections. */
 export function runTable({ job, runs }: Result): string {
-  const header = ['run', 'connections', 'verdict', 'utilisation', 'governing check', 'at', 'life'];
+  const header = [
+    'run',
+    'connections',
+    'verdict',
+    'utilisation',
+    'governing check',
+    'at',
+    'shortest life',
+  ];
   return table([header, ...runs.map((run) => row(run, job.units))], [1, 3]);
-}
-
-/** True where any check of any of the run's connections fails. */
-export function fails(run: RunResult): boolean {
-  return run.connections.some((connection) => connection.verdict === 'fails');
 }
 
 function row(run: RunResult, units: UnitSystem): string[] {
@@ -21,7 +25,7 @@ function row(run: RunResult, units: UnitSystem): string[] {
   return [
     run.run.id,
     String(run.connections.length),
-    fails(run) ? 'fails' : 'ok',
+    runFails(run) ? 'fails' : 'ok',
     governing?.utilisation == null ? '' : governing.utilisation.toFixed(2),
     governing?.check ?? 'nothing to check',
     governing === null

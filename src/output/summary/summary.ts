@@ -1,12 +1,14 @@
 import type { Result } from '../../model.ts';
+import { connectionName } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
 import { unitOf } from '../quantity.ts';
+import { runFails } from '../run-fails.ts';
 import { exempt, failures, notGiven } from './check-groups.ts';
 import { damageTable } from './damage-table.ts';
-import { connectionName } from './names.ts';
-import { CAUTION, defaults, notes, warnings } from './notes.ts';
+import { defaultLines } from './default-lines.ts';
+import { CAUTION, notes, warnings } from './notes.ts';
 import { recordLines } from './record-lines.ts';
-import { fails, runTable } from './run-table.ts';
+import { runTable } from './run-table.ts';
 import { wrap } from './text-layout.ts';
 
 /**
@@ -28,7 +30,7 @@ export function summary(result: Result): string {
     section(`Damage in ${life} years (allowed ${allowed})`, [damageTable(result)]),
     section('To bear in mind', notes(result)),
     section('Warnings', warnings(result)),
-    section('Left at their defaults', defaults(result)),
+    section('Left at their defaults', defaultLines(job.defaults)),
     [...recordLines(result), unitsLine(result), CAUTION].join('\n'),
   ];
   return `${sections.filter((text) => text !== '').join('\n\n')}\n`;
@@ -36,7 +38,7 @@ export function summary(result: Result): string {
 
 function answer(result: Result): string {
   const { runs } = result;
-  const failing = runs.filter(fails).length;
+  const failing = runs.filter(runFails).length;
   const verdict =
     failing === 0
       ? `No check fails in ${runs.length === 1 ? 'the run' : `the ${runs.length} runs`}.`

@@ -21,6 +21,11 @@ export function wrap(text: string, start = '', hang = start.length): string {
   return [...lines, line].join('\n');
 }
 
+/** One point of a list. */
+export function bullet(text: string): string {
+  return wrap(text, '  - ', 4);
+}
+
 /**
  * Rows as columns of text, two spaces apart and indented by two.
  *

@@ -1,4 +1,5 @@
 import { expect, test } from 'vitest';
+import type { Check } from '../../../src/model.ts';
 import { alongChart } from '../../../src/output/charts/along-chart.ts';
 import type { Chart, Point } from '../../../src/output/charts/chart.ts';
 import { chooseCharts } from '../../../src/output/charts/choose-charts.ts';
@@ -172,4 +173,21 @@ test('of many runs the overview shows the ones that are used most', () => {
   const chart = overviewChart(many);
   expect(setOf(chart, 'ok').length + setOf(chart, 'fails').length).toBe(30);
   expect(String(chart.configuration.options?.plugins?.subtitle?.text)).toContain('30 of 45 runs');
+});
+
+test('an infinite utilisation is drawn at the edge and told in words', () => {
+  const [run] = makeResult({ runs: [{ id: 'R1', count: 2, shearRangeLimit: 900 }] }).runs;
+  const endless = (check: Check): Check => ({ ...check, utilisation: Infinity, status: 'fail' });
+  const connections = run.connections.map((c) => ({
+    ...c,
+    verdict: 'fails' as const,
+    governing: endless(c.governing!),
+    checks: c.checks.map((check) => (check.check === 'shear range' ? endless(check) : check)),
+  }));
+  const odd = { ...result, runs: [{ ...run, connections }], governing: 0 };
+  for (const chart of [overviewChart(odd), alongChart(odd.runs[0], job)]) {
+    const points = chart.configuration.data.datasets.flatMap(({ data }) => data);
+    expect(points.every(({ x, y }) => Number.isFinite(x) && Number.isFinite(y))).toBe(true);
+  }
+  expect(titleOf(overviewChart(odd))).toContain('infinite');
 });

@@ -1,7 +1,7 @@
-import type { Connection } from '../../model.ts';
-import type { UnitSystem } from '../../units.ts';
-import { shortNumber } from '../number-text.ts';
-import { inUnits, unitOf, type Written } from '../quantity.ts';
+import type { Connection } from '../model.ts';
+import type { UnitSystem } from '../units.ts';
+import { shortNumber } from './number-text.ts';
+import { inUnits, unitOf, type Written } from './quantity.ts';
 
 /** A connection's name, such as `R1/3`. */
 export function connectionName({ run, number }: Connection): string {
@@ -33,4 +33,9 @@ export function runNames(ids: readonly string[], runs: number): string {
 /** A quantity for a person to read, such as `8.9 kN`, from base units. */
 export function amount(value: number, quantity: Written, units: UnitSystem): string {
   return `${shortNumber(inUnits(value, quantity, units))} ${unitOf(quantity, units)}`.trimEnd();
+}
+
+/** The time as the record's own clock shows it, without seconds. */
+export function stamp(time: number): string {
+  return new Date(time).toISOString().slice(0, 16).replace('T', ' ');
 }
