@@ -9,29 +9,50 @@ export interface WrittenTime {
 /**
  * Reads an ISO 8601 date and time, `2031-01-01T00:00`, with seconds and an offset (`Z`, `+02:00`) if wished.
  *
+ * Digit by digit: `Date` takes 30 February for 2 March and a time without an offset for one of the
+ * machine's own clock, and a record has many thousands of times.
+ *
  * @returns the time, or `null` where the text is none or names a day or hour that does not exist
  */
 export function readIsoTime(text: string): WrittenTime | null {
-  const match = PATTERN.exec(text);
-  if (match === null) return null;
-  const [, year, month, day, hour, minute, second = '0', zone] = match;
-  const local = Date.UTC(+year, +month - 1, +day, +hour, +minute, +second);
-  const wrong = +month < 1 || +month > 12 || +day < 1 || +day > daysIn(+year, +month);
-  if (wrong || +hour > 23 || +minute > 59 || +second > 59) return null;
-  return zone === undefined ? { local, offset: null } : withOffset(local, zone);
+  if (text[4] !== '-' || text[7] !== '-' || text[10] !== 'T' || text[13] !== ':') return null;
+  const year = digits(text, 0, 4);
+  const month = digits(text, 5, 7);
+  const day = digits(text, 8, 10);
+  const hour = digits(text, 11, 13);
+  const minute = digits(text, 14, 16);
+  if (!(month >= 1 && month <= 12 && day >= 1 && day <= daysIn(year, month))) return null;
+  if (!(hour <= 23 && minute <= 59)) return null;
+  const local = Date.UTC(year, month - 1, day, hour, minute);
+  return text.length === 16 ? { local, offset: null } : withRest(local, text.slice(16));
 }
 
-const PATTERN = /^(\d{4})-(\d\d)-(\d\d)T(\d\d):(\d\d)(?::(\d\d)(?:\.0+)?)?(Z|[+-]\d\d:?\d\d)?$/;
+/** The number that digits make from one place up to another; `NaN` where others stand there. */
+function digits(text: string, from: number, to: number): number {
+  let value = 0;
+  for (let i = from; i < to; i++) {
+    const digit = text.charCodeAt(i) - 48;
+    if (!(digit >= 0 && digit <= 9)) return Number.NaN;
+    value = value * 10 + digit;
+  }
+  return value;
+}
 
 function daysIn(year: number, month: number): number {
-  return new Date(Date.UTC(year, month, 0)).getUTCDate();
+  if (month === 2) return year % 4 === 0 && (year % 100 !== 0 || year % 400 === 0) ? 29 : 28;
+  return month === 4 || month === 6 || month === 9 || month === 11 ? 30 : 31;
 }
 
-function withOffset(local: number, zone: string): WrittenTime | null {
-  if (zone === 'Z') return { local, offset: 0 };
-  const hours = Number(zone.slice(1, 3));
-  const minutes = Number(zone.slice(-2));
-  if (hours > 14 || minutes > 59) return null;
-  const size = (hours * 60 + minutes) * 60_000;
-  return { local, offset: zone[0] === '-' ? -size : size };
+const REST = /^(?::([0-5]\d)(?:\.0+)?)?(?:(Z)|([+-])(\d\d):?([0-5]\d))?$/;
+
+/** Seconds and offset, behind hours and minutes. */
+function withRest(minute: number, text: string): WrittenTime | null {
+  const match = REST.exec(text);
+  if (match === null) return null;
+  const [, second = '0', utc, sign, hours = '0', minutes = '0'] = match;
+  const local = minute + Number(second) * 1000;
+  if (sign === undefined) return { local, offset: utc === undefined ? null : 0 };
+  if (Number(hours) > 14) return null;
+  const size = (Number(hours) * 60 + Number(minutes)) * 60_000;
+  return { local, offset: sign === '-' ? -size : size };
 }

@@ -67,22 +67,29 @@ interface Row {
 
 /** The rows that are not blank, the header first; `null` where there is none. */
 function cutRows(text: string, file: string, findings: Findings): Row[] | null {
+  const quoted = text.includes('"');
   let cut: string[][];
   try {
-    cut = parse(text, { relax_column_count: true });
+    // Without a quote, lines and commas are all there is to it, and cutting there is far faster.
+    cut = quoted ? parse(text, { relax_column_count: true }) : text.split(LINE_BREAK).map(cutLine);
   } catch (error) {
     return reportCsvFault(error, file, findings);
   }
-  const quoted = text.includes('"');
   const rows: Row[] = [];
   let line = 1;
   for (const cells of cut) {
     if (cells.some((cell) => cell !== '')) rows.push({ cells, line });
     // A line break inside quotes makes a row longer than a line.
-    line += quoted ? cells.join('').split(/\r\n|\r|\n/).length : 1;
+    line += quoted ? cells.join('').split(LINE_BREAK).length : 1;
   }
   if (rows.length > 0) return rows;
   return report(findings, { file, line: 1 }, { expected: 'a header row' });
+}
+
+const LINE_BREAK = /\r\n|\r|\n/;
+
+function cutLine(line: string): string[] {
+  return line.split(',');
 }
 
 function checkWidths(rows: readonly Row[], width: number, file: string, faults: RepeatedFaults) {

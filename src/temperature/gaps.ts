@@ -86,9 +86,9 @@ function bridge(
   const apart = times[to] - times[from];
   const missing = Math.round(apart / HOUR / stepHours - 1) * stepHours;
   standing.fill(isShort(missing, fillUpTo) ? FILLED : BRIDGED, from + 1, to);
-  const slope = (temperature[to] - temperature[from]) / apart;
+  const rise = temperature[to] - temperature[from];
   for (let i = from + 1; i < to; i++) {
-    temperature[i] = temperature[from] + slope * (times[i] - times[from]);
+    temperature[i] = temperature[from] + ((times[i] - times[from]) / apart) * rise;
   }
 }
 
