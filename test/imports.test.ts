@@ -14,14 +14,15 @@ const STAGES = [
   'commands',
 ];
 /** What every stage may use. */
-const COMMON = ['model.ts', 'issue.ts', 'units.ts'];
+const COMMON = ['model.ts', 'issue.ts', 'units.ts', 'package.json'];
 /** The numeric core: no files, no clock, no process, no packages. */
 const CORE = ['temperature', 'mechanics', 'counting', 'damage', 'verdict'];
 /** Reading asks the next stages for their data: zones from channels, curves from what the user entered. */
 const INPUT_MAY_CALL = ['temperature', 'damage'];
 /** Packages that a core file may use, and why: formulas and sun positions are a library's. */
 const CORE_PACKAGES: Readonly<Record<string, RegExp>> = {
-  'damage/formula-curve.ts': /^mathjs/,
+  'damage/formula-evaluator.ts': /^mathjs\/number$/,
+  'temperature/sun-path.ts': /^suncalc$/,
 };
 
 const root = fileURLToPath(new URL('..', import.meta.url));
@@ -82,7 +83,7 @@ describe('imports', () => {
       done.add(file);
     };
     for (const file of imports.keys()) walk(file, []);
-    expect(done.size).toBe(imports.size);
+    expect([...done]).toEqual(expect.arrayContaining([...imports.keys()]));
   });
 
   it('keep files, clock, process and packages out of the core', () => {

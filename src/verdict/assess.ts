@@ -7,6 +7,7 @@ import { traceConnection } from '../mechanics/trace.ts';
 import type { Connection, Job, Run, RunResult, Trace } from '../model.ts';
 import { coveredHours, yearsOf } from '../temperature/gaps.ts';
 import { assessConnection, fastenerSpectrum, fastenerUse } from './connection.ts';
+import { firstLargest } from './first-largest.ts';
 import { momentText } from './moment-text.ts';
 import { createPassCounters } from './pass-counters.ts';
 import { runChain, runExtremes, runStrain } from './run-chain.ts';
@@ -71,17 +72,9 @@ export function assessRun(run: Run, job: Job, tables: DamageTables): RunResult {
 
 /** Index of the connection with the largest governing utilisation; of the largest shear range where none has one. */
 function governingConnection(connections: readonly Connection[]): number {
-  const rank = ({ governing, shearRange }: Connection) => [
-    governing?.utilisation ?? -1,
-    shearRange,
-  ];
-  let most = 0;
-  for (let i = 1; i < connections.length; i++) {
-    const [use, range] = rank(connections[i]);
-    const [mostUse, mostRange] = rank(connections[most]);
-    if (use > mostUse || (use === mostUse && range > mostRange)) most = i;
-  }
-  return most;
+  const uses = connections.map(({ governing }) => governing?.utilisation ?? 0);
+  const judged = uses.some((use) => use > 0);
+  return firstLargest(judged ? uses : connections.map(({ shearRange }) => shearRange));
 }
 
 function binsOf(

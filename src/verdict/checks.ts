@@ -9,6 +9,8 @@ import type {
   Role,
 } from '../model.ts';
 
+import { firstLargest } from './first-largest.ts';
+
 /** A demand and when it arose. */
 export interface Demand {
   readonly value: number;
@@ -64,12 +66,9 @@ export function checksOf(
 
 /** The check with the largest utilisation of those that pass or fail, the earlier on a tie; `null` without any. */
 export function governingCheck(checks: readonly Check[]): Check | null {
-  let governing: Check | null = null;
-  for (const check of checks) {
-    if (check.status !== 'pass' && check.status !== 'fail') continue;
-    if (governing === null || check.utilisation! > governing.utilisation!) governing = check;
-  }
-  return governing;
+  const judged = checks.filter(({ status }) => status === 'pass' || status === 'fail');
+  if (judged.length === 0) return null;
+  return judged[firstLargest(judged.map(({ utilisation }) => utilisation ?? 0))];
 }
 
 function damageCheck(check: CheckName, perYear: number | null, limits: Limits): Check {

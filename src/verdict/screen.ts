@@ -1,6 +1,7 @@
 import { createDamageTables } from '../damage/damage-table.ts';
 import type { Job, Result } from '../model.ts';
 import { assessRun } from './assess.ts';
+import { firstLargest } from './first-largest.ts';
 
 /**
  * Screens every run of a job: mechanics, counting, damage, checks and verdicts. The library's main call.
@@ -10,6 +11,6 @@ import { assessRun } from './assess.ts';
 export function screen(job: Job): Result {
   const tables = createDamageTables();
   const runs = job.runs.map((run) => assessRun(run, job, tables));
-  const use = runs.map((run) => run.connections[run.governing].governing?.utilisation ?? -1);
-  return { job, runs, governing: use.indexOf(Math.max(...use)) };
+  const uses = runs.map((run) => run.connections[run.governing].governing?.utilisation ?? 0);
+  return { job, runs, governing: firstLargest(uses) };
 }
