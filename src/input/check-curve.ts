@@ -1,3 +1,4 @@
+import type { Place } from '../issue.ts';
 import type { Curve } from '../model.ts';
 import { quantityOf } from '../units.ts';
 import { type Findings, report } from './findings.ts';
@@ -86,13 +87,11 @@ function rangesOf(
   const ranges = givenRanges(way, values, map, findings);
   const [first] = ranges;
   if (first === undefined) return null;
-  for (const { of, key } of ranges) {
+  for (const { of, key, place } of ranges) {
     if (of === first.of) continue;
     const found = givenText(map, key) ?? `a ${of}`;
-    return report(findings, placeOf(map, key), {
-      found,
-      expected: `a ${first.of}, as ${first.key} is one`,
-    });
+    const expected = `a ${first.of}, as in ${first.key}`;
+    return report(findings, place, { found, expected });
   }
   return first.of;
 }
@@ -100,6 +99,7 @@ function rangesOf(
 interface GivenRange {
   readonly of: Curve['of'];
   readonly key: CurveKey;
+  readonly place: Place;
 }
 
 function givenRanges(
@@ -109,12 +109,12 @@ function givenRanges(
   findings: Findings,
 ): GivenRange[] {
   const ranges: GivenRange[] = [];
-  const add = (key: CurveKey, of: Curve['of'] | null | undefined) => {
-    if (of != null) ranges.push({ of, key });
+  const add = (key: CurveKey, of: Curve['of'] | null | undefined, place = placeOf(map, key)) => {
+    if (of != null) ranges.push({ of, key, place });
   };
   const addRange = (key: CurveKey, range: RangeValue | null | undefined) => add(key, range?.of);
   add('shape', way === 'shape' ? 'stress' : null);
-  for (const { range } of values.points ?? []) add('points', range.of);
+  for (const { range, place } of values.points ?? []) add('points', range.of, place);
   addRange('constant', values.constant);
   addRange('threshold', values.threshold);
   if (typeof values.formula_unit === 'string') {

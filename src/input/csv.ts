@@ -98,9 +98,17 @@ function toMap(row: readonly Cell[], columns: readonly Column[], findings: Findi
       if (text !== '') reportExtra(text, place, columns.length, findings);
       continue;
     }
-    const value = { type: 'text', text, place: { ...place, key: column.header.text } } as const;
-    const withUnit = column.unit === undefined ? value : { ...value, unit: column.unit };
-    entries.set(column.name, { value: withUnit, place: column.header.place });
+    const header = {
+      place: column.header.place,
+      ...(column.unit === undefined ? {} : { unit: column.unit }),
+    };
+    const value = {
+      type: 'text',
+      text,
+      place: { ...place, key: column.header.text },
+      column: header,
+    } as const;
+    entries.set(column.name, { value, place: column.header.place });
   }
   const { file, line } = row[0].place;
   return { type: 'map', entries, place: { file, ...(line === undefined ? {} : { line }) } };

@@ -255,7 +255,7 @@ export const MEMBER_KEYS = {
   modulus: {
     kind: 'stress',
     required: true,
-    over: 0,
+    from: 1,
     to: 1e8,
     example: '70 GPa',
     meaning: "Young's modulus E.",
@@ -656,7 +656,9 @@ export const RUN_KEYS = {
     meaning: 'Zone of the structure behind, where it moves too.',
   },
   structure_expansion: {
-    ...EXPANSION,
+    kind: 'expansion',
+    from: 0,
+    to: 1e-2,
     needs: 'required with `structure_zone`',
     example: '10e-6 / K',
     meaning: 'Coefficient of thermal expansion α_s of the structure.',

@@ -7,6 +7,7 @@ import {
   readQuantity,
 } from '../units.ts';
 import { boundsText, isWithin } from './bounds.ts';
+import { columnUnitFault } from './column-unit.ts';
 import { readIsoTime } from './iso-time.ts';
 import type { Key, Kind } from './keys.ts';
 import { readFixed, readLengths, readPoints } from './read-list.ts';
@@ -30,7 +31,8 @@ export function readValue<K extends Kind>(
   key: Key & { readonly kind: K },
   source: Source,
 ): Outcome<KindValues[K]> {
-  return READERS[key.kind](source, key);
+  const fault = columnUnitFault(source, key);
+  return fault === null ? READERS[key.kind](source, key) : { faults: [fault] };
 }
 
 type TextReader<T> = (source: SourceText, key: Key) => Outcome<T>;
@@ -77,8 +79,8 @@ function text<T>(reader: TextReader<T>): Reader<T> {
 }
 
 function quantity(of: Quantity): Reader<number> {
-  return text(({ text: typed, unit }, key) => {
-    const { value, hint } = readQuantity(typed, of, unit);
+  return text(({ text: typed, column }, key) => {
+    const { value, hint } = readQuantity(typed, of, column?.unit);
     const name = quantityName(of);
     if (value === null) return fault(typed, wanted(key), hint);
     return bounded(value, typed, key, { name, unit: baseUnit(of) });
@@ -108,7 +110,8 @@ function readWholeNumber({ text: typed }: SourceText, key: Key): Outcome<number>
 }
 
 function readRange(source: SourceText, key: Key): Outcome<RangeValue> {
-  const { text: typed, unit } = source;
+  const { text: typed, column } = source;
+  const unit = column?.unit;
   const of = quantityOf(typed, ['force', 'stress']) ?? quantityOf(unit ?? '', ['force', 'stress']);
   const read = of === null ? { value: null } : readQuantity(typed, of, unit);
   if (of === null || read.value === null) {

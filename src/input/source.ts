@@ -5,8 +5,8 @@ export interface SourceText {
   readonly type: 'text';
   readonly text: string;
   readonly place: Place;
-  /** Unit in the header of the value's column, which applies where the value has none. */
-  readonly unit?: string;
+  /** The header of the value's column, whose unit applies where the value has none. */
+  readonly column?: { readonly unit?: string; readonly place: Place };
 }
 
 export interface SourceList {

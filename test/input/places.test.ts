@@ -46,7 +46,10 @@ describe('places in CSV', () => {
   it('come with the cell as typed and the unit of its column', () => {
     expect(cell(rows[0], 'note')).toMatchObject({ text: 'a, "b"\nsecond line' });
     expect(cell(rows[1], 'id')).toMatchObject({ text: '01' });
-    expect(cell(rows[1], 'area')).toMatchObject({ text: '460', unit: 'mm²' });
+    expect(cell(rows[1], 'area')).toMatchObject({
+      text: '460',
+      column: { unit: 'mm²', place: { line: 1, column: 4 } },
+    });
   });
 
   it('are the same with the line ends of another system', () => {
