@@ -2,7 +2,12 @@ import type { Residue, Spectrum } from '../model.ts';
 import { closeCycles } from './close-cycles.ts';
 import { FloatList } from './float-list.ts';
 import { halfRanges, repeatedRanges } from './residue.ts';
-import { createTurningState, findTurningPoints, type Slice } from './turning-points.ts';
+import {
+  createTurningState,
+  findTurningPoints,
+  type Slice,
+  startTurning,
+} from './turning-points.ts';
 
 /** Ranges under this share of the series' largest are rounding, not cycles. */
 const NEGLIGIBLE = 1e-6;
@@ -50,7 +55,7 @@ export function createRainflow(options: { compressionShare?: number } = {}): Rai
   const share = options.compressionShare ?? 1;
   const mapped = share === 1 ? null : new Float64Array(BLOCK);
   const points = new Float64Array(BLOCK);
-  const state = createTurningState(0);
+  const state = createTurningState();
   const bounds = new Float64Array(2);
   const stack = new FloatList();
   const ranges = new FloatList();
@@ -59,8 +64,7 @@ export function createRainflow(options: { compressionShare?: number } = {}): Rai
   function start(first: number): void {
     const counted = first < 0 ? share * first : first;
     bounds.fill(first);
-    state.last[0] = counted;
-    state.course.fill(0);
+    startTurning(state, counted);
     stack.data[0] = counted;
     stack.length = 1;
     empty = false;

@@ -1,6 +1,6 @@
 import { closeCycles } from './close-cycles.ts';
 import { FloatList } from './float-list.ts';
-import { createTurningState, findTurningPoints } from './turning-points.ts';
+import { createTurningState, findTurningPoints, startTurning } from './turning-points.ts';
 
 /**
  * Ranges of the half cycles that an open history leaves: one between each two neighbours.
@@ -28,7 +28,8 @@ export function repeatedRanges(residue: Float64Array): Float64Array {
   if (residue.length < 2) return new Float64Array(0);
   const loop = closedLoop(residue);
   const points = new Float64Array(loop.length);
-  const state = createTurningState(loop[0]);
+  const state = createTurningState();
+  startTurning(state, loop[0]);
   const slice = { values: loop, offset: 0, stride: 1, count: loop.length };
   const found = findTurningPoints(slice, state, points);
   const stack = new FloatList();

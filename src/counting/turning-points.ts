@@ -10,13 +10,22 @@ export interface Slice {
 export interface TurningState {
   /** The last value seen. One element: a field that changes from integers to fractions is slow in V8. */
   readonly last: Float64Array;
-  /** 1 or 0: whether the series was last rising, whether it was last falling; neither at its start. */
+  /** 1 while the series rises, 0 while it falls, `LEVEL` before its first step. */
   readonly course: Uint8Array;
 }
 
-/** A search that has seen nothing but the series' first value. */
-export function createTurningState(first: number): TurningState {
-  return { last: Float64Array.of(first), course: new Uint8Array(2) };
+/** The series has not left its first value yet. */
+const LEVEL = 2;
+
+/** A search that has seen nothing. */
+export function createTurningState(): TurningState {
+  return { last: new Float64Array(1), course: new Uint8Array(1) };
+}
+
+/** Starts the search anew at a series' first value. */
+export function startTurning(state: TurningState, first: number): void {
+  state.last[0] = first;
+  state.course[0] = LEVEL;
 }
 
 /**
@@ -31,23 +40,31 @@ export function createTurningState(first: number): TurningState {
  * @param out room for `slice.count` values; what lies beyond the returned count is scrap
  */
 export function findTurningPoints(slice: Slice, state: TurningState, out: Float64Array): number {
+  if (state.course[0] === LEVEL) state.course[0] = firstCourse(slice, state.last[0]);
+  if (state.course[0] === LEVEL) return 0;
   const { values, stride, count } = slice;
   let last = state.last[0];
-  let [rising, falling] = state.course;
+  let rising = state.course[0];
   let found = 0;
   // No branch: whether a noisy series turns is a coin's toss that the processor cannot foretell.
   for (let i = 0, at = slice.offset; i < count; i++, at += stride) {
     const value = values[at];
-    const up = Number(value > last);
-    const down = Number(value < last);
+    const turns = Number(value !== last) & (Number(value > last) ^ rising);
     out[found] = last;
-    found += (up & falling) | (down & rising);
-    rising = (rising | up) & (down ^ 1);
-    falling = (falling | down) & (up ^ 1);
+    found += turns;
+    rising ^= turns;
     last = value;
   }
   state.last[0] = last;
   state.course[0] = rising;
-  state.course[1] = falling;
   return found;
+}
+
+/** Which way the series leaves its first value, or `LEVEL` if it does not in this block. */
+function firstCourse({ values, offset, stride, count }: Slice, first: number): number {
+  for (let i = 0; i < count; i++) {
+    const value = values[offset + i * stride];
+    if (value !== first) return Number(value > first);
+  }
+  return LEVEL;
 }
