@@ -10,6 +10,8 @@ export interface ChainSpec {
   readonly freePlay: Float64Array;
   /** Friction force before the joint slips, g [N]; under 1 N counts as 1 N where there is free play. */
   readonly grip: Float64Array;
+  /** Free member beyond the last fastener at either end [mm]; none where not given. */
+  readonly overhang?: number;
 }
 
 /** A joint that holds: f = k·(d − s) with s at rest. A joint that bears is stuck too, at s = ±c. */
@@ -25,7 +27,7 @@ export const MARK = 1;
 
 /**
  * One run and the state it is in. Columns over the fasteners, allocated once and changed in place: within one
- * state every joint is the straight line f = tangent·d + offset between the deformations `lower` and `upper`.
+ * state every joint is the straight line f = tangent·u + offset between the movements `lower` and `upper`.
  */
 export interface Chain {
   readonly count: number;
@@ -40,15 +42,20 @@ export interface Chain {
   readonly slipTangent: Float64Array;
   /** Growth of the slip force with slip, h [N/mm], that gives that tangent: k·h/(k + h). */
   readonly slipHardening: Float64Array;
+  /** Free member beyond the last fastener at either end [mm]. */
+  readonly overhang: number;
 
   /** Mismatch strain, and how far along the record's path it was reached. */
   readonly now: Float64Array;
   /** `STUCK`, `SLIPS_UP` or `SLIPS_DOWN`. */
   readonly mode: Int8Array;
-  /** Movement of the member against the structure, d [mm]. */
+  /** Movement since the joint's mode began, u [mm]: small numbers keep the digits that k times all of d would lose. */
   readonly movement: Float64Array;
   readonly tangent: Float64Array;
+  /** Force when the mode began [N]. */
   readonly offset: Float64Array;
+  /** Slip when the mode began [mm]. */
+  readonly rest: Float64Array;
   readonly lower: Float64Array;
   readonly upper: Float64Array;
   /** So near to a limit counts as at it [mm]: joints that differ by rounding only then turn together. */
@@ -103,11 +110,13 @@ export function chainState(spec: ChainSpec): Chain {
     grip: spec.grip.map((g) => Math.max(g, LEAST_GRIP)),
     slipTangent,
     slipHardening: slipTangent.map((t, i) => (stiffness[i] * t) / (stiffness[i] - t)),
+    overhang: spec.overhang ?? 0,
     now: new Float64Array(2),
     mode: new Int8Array(count),
     movement: column(),
     tangent: column(),
     offset: column(),
+    rest: column(),
     lower: column(),
     upper: column(),
     nearness: column(),

@@ -5,6 +5,9 @@ import type { RowSink } from './row-sink.ts';
 
 export type { Chain, ChainSpec };
 
+/** Changes of mode at one strain, per fastener, after which something is wrong with the solver. */
+const MOST_IDLE = 100;
+
 /**
  * A run of n fasteners on one member, at lock-in.
  *
@@ -18,7 +21,7 @@ export function createChain(spec: ChainSpec): Chain {
 
 /** Brings the chain back to lock-in: no strain, no force, every bolt centred, nothing slid. */
 export function resetChain(chain: Chain): void {
-  const zeroed = [chain.now, chain.movement, chain.slideStart, chain.slid];
+  const zeroed = [chain.now, chain.movement, chain.rest, chain.slideStart, chain.slid];
   for (const column of [...zeroed, chain.slipPeak, chain.slipPeakMark]) column.fill(0);
   releaseJoints(chain);
   solveRates(chain);
@@ -33,6 +36,7 @@ export function resetChain(chain: Chain): void {
  * @param strain mismatch strain ε = α·θ − α_s·θ_s at the end of the way
  * @param sink takes the forces at every event and at the end, with a mark `leg` … `leg + 1` along the way
  * @param leg number of this way in the record's path
+ * @throws Error if joints keep changing their modes at one strain, which no run should do
  */
 export function moveTo(chain: Chain, strain: number, sink: RowSink | null = null, leg = 0): void {
   const { now } = chain;
@@ -56,6 +60,7 @@ export function moveTo(chain: Chain, strain: number, sink: RowSink | null = null
       // Taking all joints at their limits at once settles nearly always at the first try. Should it ever go round in
       // circles, the one of the lowest number alone does not: Murty's least-index rule for a P-matrix problem.
       idle++;
+      if (idle > MOST_IDLE * (chain.count + 1)) throw new Error('the run finds no way to go on');
       turnJoints(chain, direction, idle > 2 * chain.count + 8 ? first : -1);
       solveRates(chain);
     }

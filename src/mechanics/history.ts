@@ -33,6 +33,8 @@ export interface History {
   readonly allShear: Envelope;
   /** Span forces from lock-in through all passes and to each extreme. */
   readonly allSpans: Envelope;
+  /** Movement of the member's left and right end, rightward positive, over the same [mm]. */
+  readonly allEnds: Envelope;
 }
 
 export interface HistoryOptions {
@@ -95,6 +97,7 @@ class Follower {
   private readonly countedSpans: Envelope;
   private readonly allShear: Envelope;
   private readonly allSpans: Envelope;
+  private readonly allEnds: Envelope;
   private readonly slidBefore: Float64Array;
   private readonly extremeSlip: Float64Array;
   private readonly extremeSlipMark: Float64Array;
@@ -111,6 +114,7 @@ class Follower {
     this.countedSpans = createEnvelope(count - 1);
     this.allShear = createEnvelope(count);
     this.allSpans = createEnvelope(count - 1);
+    this.allEnds = createEnvelope(2);
     this.slidBefore = new Float64Array(count);
     this.extremeSlip = new Float64Array(count);
     this.extremeSlipMark = new Float64Array(count);
@@ -167,6 +171,7 @@ class Follower {
       countedSpans: this.countedSpans,
       allShear: this.allShear,
       allSpans: this.allSpans,
+      allEnds: this.allEnds,
     };
   }
 
@@ -187,7 +192,8 @@ class Follower {
     bookSlides(this.chain);
   }
 
-  private takeBlock({ values, marks, rows }: RowSink): void {
+  private takeBlock({ values, ends, marks, rows }: RowSink): void {
+    widen(this.allEnds, ends, marks, rows);
     spanForces(values, this.spans, this.chain.count, rows);
     widen(this.counting ? this.countedShear : this.allShear, values, marks, rows);
     widen(this.counting ? this.countedSpans : this.allSpans, this.spans, marks, rows);

@@ -38,10 +38,14 @@ export function changeMode(chain: Chain, i: number, up: number): void {
 
 /** The slip s of joint i now [mm]. */
 export function slipOf(chain: Chain, i: number): number {
-  const force = chain.tangent[i] * chain.movement[i] + chain.offset[i];
-  return chain.mode[i] === STUCK
-    ? -chain.offset[i] / chain.stiffness[i]
-    : chain.movement[i] - force / chain.stiffness[i];
+  const { mode, rest, tangent, stiffness, movement } = chain;
+  return mode[i] === STUCK ? rest[i] : rest[i] + (1 - tangent[i] / stiffness[i]) * movement[i];
+}
+
+/** Movement d of the member against the structure at joint i now [mm]. */
+export function movementOf(chain: Chain, i: number): number {
+  const force = chain.offset[i] + chain.tangent[i] * chain.movement[i];
+  return force / chain.stiffness[i] + slipOf(chain, i);
 }
 
 /** Books the slide of joint i up to now: sliding distance and largest slip. */
@@ -55,16 +59,11 @@ export function bookSlide(chain: Chain, i: number, slip: number): void {
 }
 
 function startSlip(chain: Chain, i: number, up: number): void {
-  const k = chain.stiffness[i];
   const tangent = chain.slipTangent[i];
-  const movement = chain.movement[i];
-  const offset = k * movement + chain.offset[i] - tangent * movement;
-  chain.slideStart[i] = -chain.offset[i] / k;
-  chain.mode[i] = up;
-  chain.tangent[i] = tangent;
-  chain.offset[i] = offset;
-  // s = d − f/k reaches ±c there
-  const bears = (up * chain.freePlay[i] + offset / k) / (1 - tangent / k);
+  beginMode(chain, i, up, tangent);
+  chain.slideStart[i] = chain.rest[i];
+  // s = rest + (1 − tangent/k)·u reaches ±c there
+  const bears = (up * chain.freePlay[i] - chain.rest[i]) / (1 - tangent / chain.stiffness[i]);
   // a slipping joint that turns round is past its limit at once
   chain.upper[i] = up === SLIPS_UP ? bears : Number.NEGATIVE_INFINITY;
   chain.lower[i] = up === SLIPS_DOWN ? bears : Number.POSITIVE_INFINITY;
@@ -74,19 +73,21 @@ function startSlip(chain: Chain, i: number, up: number): void {
 function stopSlip(chain: Chain, i: number, bears: boolean): void {
   const k = chain.stiffness[i];
   const up = chain.mode[i];
-  const movement = chain.movement[i];
-  const force = chain.tangent[i] * movement + chain.offset[i];
-  const slip = movement - force / k;
+  const slip = bears ? up * chain.freePlay[i] : slipOf(chain, i);
   bookSlide(chain, i, slip);
-  const offset = force - k * movement;
-  const hardened = chain.slipHardening[i] * slip;
-  chain.mode[i] = STUCK;
-  chain.tangent[i] = k;
-  chain.offset[i] = offset;
+  beginMode(chain, i, STUCK, k);
+  chain.rest[i] = slip;
   const grip = chain.grip[i];
+  const centre = chain.slipHardening[i] * slip - chain.offset[i];
   chain.nearness[i] = (NEAR * grip) / k;
-  chain.upper[i] =
-    bears && up === SLIPS_UP ? Number.POSITIVE_INFINITY : (grip + hardened - offset) / k;
-  chain.lower[i] =
-    bears && up === SLIPS_DOWN ? Number.NEGATIVE_INFINITY : (-grip + hardened - offset) / k;
+  chain.upper[i] = bears && up === SLIPS_UP ? Number.POSITIVE_INFINITY : (centre + grip) / k;
+  chain.lower[i] = bears && up === SLIPS_DOWN ? Number.NEGATIVE_INFINITY : (centre - grip) / k;
+}
+
+/** Begins a mode with the force that the joint has now. */
+function beginMode(chain: Chain, i: number, mode: number, tangent: number): void {
+  chain.offset[i] += chain.tangent[i] * chain.movement[i];
+  chain.movement[i] = 0;
+  chain.mode[i] = mode;
+  chain.tangent[i] = tangent;
 }

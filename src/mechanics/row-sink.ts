@@ -1,4 +1,5 @@
-import { type Chain, MARK } from './chain-state.ts';
+import { type Chain, MARK, STRAIN } from './chain-state.ts';
+import { movementOf } from './joint.ts';
 
 /**
  * Collects the forces of all connections at every event and turning point, in blocks: row-major, one row a moment, one
@@ -9,6 +10,8 @@ export class RowSink {
   readonly capacity: number;
   /** Forces f of the block's rows [N]. */
   readonly values: Float64Array;
+  /** Movement of the member's left and right end against the structure, rightward positive, two a row [mm]. */
+  readonly ends: Float64Array;
   /** How far along the record's path each row lies: leg and share of the leg. */
   readonly marks: Float64Array;
   rows = 0;
@@ -19,6 +22,7 @@ export class RowSink {
     // some 256 KiB a block stay in the cache while every column is counted
     this.capacity = Math.min(4096, Math.max(64, Math.floor(32_768 / columns)));
     this.values = new Float64Array(this.capacity * columns);
+    this.ends = new Float64Array(this.capacity * 2);
     this.marks = new Float64Array(this.capacity);
     this.onBlock = onBlock;
   }
@@ -26,6 +30,7 @@ export class RowSink {
   /** Adds the chain's forces now as one row. */
   take(chain: Chain): void {
     writeRow(chain, this.values, this.rows * this.columns);
+    writeEnds(chain, this.ends, this.rows * 2);
     this.marks[this.rows] = chain.now[MARK];
     this.rows++;
     if (this.rows === this.capacity) this.flush();
@@ -41,4 +46,11 @@ export class RowSink {
 function writeRow(chain: Chain, values: Float64Array, at: number): void {
   const { count, tangent, movement, offset } = chain;
   for (let i = 0; i < count; i++) values[at + i] = tangent[i] * movement[i] + offset[i];
+}
+
+/** Beyond the last fastener the member is free, so it strains by all of ε. */
+function writeEnds(chain: Chain, ends: Float64Array, at: number): void {
+  const free = chain.overhang * chain.now[STRAIN];
+  ends[at] = movementOf(chain, 0) - free;
+  ends[at + 1] = movementOf(chain, chain.count - 1) + free;
 }

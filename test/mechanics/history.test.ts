@@ -67,6 +67,15 @@ describe('a record', () => {
     expect([...history.slipPeak]).toEqual(slips.map((s) => expect.closeTo(s, 6)));
   });
 
+  it('moves its free ends by the free strain less what the friction squeezes', () => {
+    const [grip, strain, overhang] = [250, 1.2e-3, 150];
+    const { history } = follow({ ...slottedRun(grip, 50), overhang }, [0, strain]);
+    const out = SPACING * (2 * strain - (3 * grip) / EA) + overhang * strain;
+    expect(history.allEnds.max[1]).toBeCloseTo(out, 6);
+    expect(history.allEnds.min[0]).toBeCloseTo(-out, 6);
+    expect(history.allEnds.min[1]).toBeCloseTo(0, 6);
+  });
+
   it('slides there and back once a cycle', () => {
     const grip = 250;
     const { history } = follow(slottedRun(grip, 50), [0, 1.2e-3, 0]);
