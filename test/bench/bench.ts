@@ -1,0 +1,16 @@
+import { chainBench } from './chain.bench-part.ts';
+import type { BenchRow } from './in-turns.ts';
+
+const parts: readonly (readonly [string, () => BenchRow[]])[] = [
+  ['chain, against 8,760 bare tridiagonal solves', chainBench],
+];
+
+for (const [title, part] of parts) {
+  console.log(title);
+  for (const { name, ratio, goal, milliseconds } of part()) {
+    const aim = goal === null ? '' : `goal under ${goal}${ratio < goal ? '' : ', missed'}`;
+    console.log(
+      `  ${ratio.toFixed(2).padStart(7)} ×  ${milliseconds.toFixed(1).padStart(8)} ms  ${name}  ${aim}`,
+    );
+  }
+}
