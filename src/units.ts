@@ -157,12 +157,16 @@ function split(text: string): { number: number | null; unit: string } {
   const fraction = FRACTION.exec(plain);
   if (fraction !== null) {
     const [, whole = '0', above, below, unit] = fraction;
-    return { number: Number(whole) + Number(above) / Number(below), unit };
+    return { number: Number(whole) + Number(above) / Number(below), unit: plainUnit(unit) };
   }
   const match = NUMBER.exec(plain);
-  if (match === null) return { number: null, unit: plain };
-  // «1/K» is a unit in a header and a quantity in a cell: both read as one over a kelvin.
-  return { number: Number(match[1]), unit: match[2].replace(/^1\s*\//, '/') };
+  if (match === null) return { number: null, unit: plainUnit(plain) };
+  return { number: Number(match[1]), unit: plainUnit(match[2]) };
+}
+
+/** A unit in the form that mathjs reads: `mm4` as a power, and `1/K` behind a number as one over a kelvin. */
+function plainUnit(unit: string): string {
+  return unit.replace(/([a-z])(\d)/gi, '$1^$2').replace(/^1\s*\//, '/');
 }
 
 function plainCharacters(text: string): string {
@@ -178,9 +182,6 @@ function plainCharacters(text: string): string {
     .replace(/(?<=\d)\s*[*×x]\s*10\^/, 'e')
     .replace(/^10\^/, '1e')
     .replace(/(?:°|deg)\s*([CF])\b/g, 'deg$1')
-    .replace(/([a-z])(\d)/gi, (pair, letter, digit) =>
-      letter === 'e' ? pair : `${letter}^${digit}`,
-    )
     .replace(/"$/, ' in')
     .replace(/\byrs?\b/, 'year')
     .trim();

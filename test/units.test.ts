@@ -24,6 +24,8 @@ const READ: readonly [string, Quantity, number][] = [
   ['24"', 'length', 609.6],
   ['0.6 m', 'length', 600],
   ['60cm', 'length', 600],
+  ['6E2 mm', 'length', 600],
+  ['6e2mm', 'length', 600],
   ['1 in^2', 'area', 645.16],
   ['450 mm2', 'area', 450],
   ['450 mm²', 'area', 450],

@@ -4,7 +4,7 @@ import type { Findings } from './findings.ts';
 import { CURVE_POINT_KEYS } from './keys.ts';
 import { readKeys } from './read-keys.ts';
 import { givenText, type Source, type SourceMap } from './source.ts';
-import { readTable } from './table.ts';
+import { rowOf } from './table.ts';
 import type { PointValue } from './values.ts';
 
 /** A curve as the user gave it. */
@@ -31,12 +31,7 @@ export async function readCurveRows(
   const rows: CurveRow[] = [];
   for (const item of items) {
     if (item.type !== 'text') {
-      const table = await readTable(
-        { type: 'list', items: [item], place: item.place },
-        files,
-        findings,
-      );
-      rows.push(...table.map((map) => ({ map, points: null })));
+      rows.push(...rowOf(item, findings).map((map) => ({ map, points: null })));
       continue;
     }
     const text = await files.read(item.text, item.place, findings);

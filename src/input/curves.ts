@@ -48,12 +48,23 @@ async function readCurve({ map, points }: CurveRow, findings: Findings): Promise
     const found = givenText(map, key ?? 'points') ?? `${whole.points?.length} points`;
     return report(findings, placeOf(map, key ?? 'points'), { found, expected: curve });
   }
-  if (whole.below === null) findings.defaults.push({ key: `${prefix}below`, value: curve.below });
+  noteDefaults(whole, curve, prefix, findings);
   const characteristic = whole.characteristic ?? whole.shape !== null;
   if (characteristic && whole.survival !== null) {
     findings.warnings.push(WARNINGS.characteristicWithScatter(curve.id));
   }
   return curve;
+}
+
+/** Notes what was left out and stands as the curve's builder set it. */
+function noteDefaults(values: CurveValues, curve: Curve, prefix: string, findings: Findings): void {
+  const note = (key: keyof CurveValues, value: string) => {
+    if (values[key] === null) findings.defaults.push({ key: `${prefix}${key}`, value });
+  };
+  note('below', curve.below);
+  if (curve.of === 'force') return;
+  note('on', curve.on);
+  note('compression_share', `${curve.compressionShare}`);
 }
 
 function traitsOf(values: CurveValues, of: Curve['of']): CurveTraits {
@@ -62,9 +73,9 @@ function traitsOf(values: CurveValues, of: Curve['of']): CurveTraits {
   return {
     id: values.id,
     of,
-    on: values.on,
+    on: values.on ?? undefined,
     below: values.below ?? undefined,
-    compressionShare: values.compression_share,
+    compressionShare: values.compression_share ?? undefined,
     survivalDivisor:
       deviation === null || survival === null ? 1 : survivalDivisor(deviation, survival),
     thicknessEffect: reference === null || exponent === null ? null : { reference, exponent },

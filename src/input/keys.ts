@@ -47,11 +47,15 @@ export interface Key {
 
 export type KeyTable = Readonly<Record<string, Key>>;
 
-/** No build, no wreck and no test piece in this trade is beyond these [mm, mm², N, MPa, …]. */
+/** Temperatures beyond these [°C] are no building's, and mostly a logger's mark for a fault. */
+export const COLDEST = -150;
+export const HOTTEST = 500;
+
+/** Nothing that this trade builds is beyond these [mm, mm², N, 1/K]: a slip of the unit is. */
 const LENGTH = { kind: 'length', to: 1e8 } as const;
 const AREA = { kind: 'area', over: 0, to: 1e9 } as const;
 const FORCE = { kind: 'force', to: 1e12 } as const;
-const TEMPERATURE = { kind: 'temperature', from: -150, to: 500 } as const;
+const TEMPERATURE = { kind: 'temperature', from: COLDEST, to: HOTTEST } as const;
 const EXPANSION = { kind: 'expansion', over: 0, to: 1e-2 } as const;
 const FACTOR = { kind: 'number', over: 0, to: 100 } as const;
 
@@ -509,7 +513,7 @@ export const CURVE_KEYS = {
   on: {
     kind: 'choice',
     choices: ['net', 'gross'],
-    default: 'net',
+    needs: 'net where not given; curves of stress only',
     example: 'gross',
     meaning: "The member's area that the stress is reckoned on.",
   },
@@ -517,7 +521,7 @@ export const CURVE_KEYS = {
     kind: 'number',
     from: 0,
     to: 1,
-    default: '1',
+    needs: '1 where not given; curves of stress only',
     example: '60 %',
     meaning:
       "Share of a cycle's compressive part that counts; less than 1 never for as-welded details.",
@@ -643,8 +647,8 @@ export const RUN_KEYS = {
   },
   lock_in: {
     kind: 'temperature or time',
-    from: -150,
-    to: 500,
+    from: COLDEST,
+    to: HOTTEST,
     required: true,
     example: '15 degC',
     meaning:
@@ -665,8 +669,8 @@ export const RUN_KEYS = {
   },
   structure_lock_in: {
     kind: 'temperature',
-    from: -150,
-    to: 500,
+    from: COLDEST,
+    to: HOTTEST,
     needs:
       'its own temperature at the time of `lock_in`, or its constant, where not given; else required',
     example: '18 degC',

@@ -51,17 +51,9 @@ export function readPoints(
   readRange: Reader<RangeValue>,
 ): Outcome<PointValue[]> {
   if (source.type !== 'list') return wrongForm(source, wanted(key));
-  return readEach(source.items, (item) => {
+  return readEach<PointValue>(source.items, (item) => {
     if (item.type !== 'list' || item.items.length !== 2) {
-      return {
-        faults: [
-          {
-            place: item.place,
-            found: shown(item),
-            expected: 'a pair of cycles and a range, such as [1e4, 526 MPa]',
-          },
-        ],
-      };
+      return fault(shown(item), 'a pair of cycles and a range, such as [1e4, 526 MPa]');
     }
     const [cycles, range] = item.items;
     const bounds = { over: 0, to: 1e30 };

@@ -3,6 +3,7 @@ import type { Place } from '../issue.ts';
 import { reportCsvFault } from './csv-fault.ts';
 import { type Findings, report } from './findings.ts';
 import { readIsoTime } from './iso-time.ts';
+import { COLDEST, HOTTEST } from './keys.ts';
 import { type RecordColumn, recordColumns } from './record-columns.ts';
 import { type RepeatedFaults, repeatedFaults } from './repeated-faults.ts';
 import type { SourceMap } from './source.ts';
@@ -16,10 +17,6 @@ export interface RecordTable {
   /** Offset of the record's clock from UTC [ms]; `null` where the record names none. */
   readonly offset: number | null;
 }
-
-/** Temperatures beyond these [°C] are no building's, and mostly a logger's mark for a fault. */
-const COLDEST = -150;
-const HOTTEST = 500;
 
 /**
  * Reads the record's CSV.

@@ -23,7 +23,8 @@ export async function readTable(
   return [];
 }
 
-function rowOf(item: Source, findings: Findings): SourceMap[] {
+/** A row of a list; none where the item is no mapping, which is reported. */
+export function rowOf(item: Source, findings: Findings): SourceMap[] {
   if (item.type === 'map') return [item];
   const outcome = wrongForm(item, 'a mapping of keys to values');
   if ('faults' in outcome) report(findings, item.place, outcome.faults[0]);
