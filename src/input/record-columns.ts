@@ -79,6 +79,9 @@ function mappedColumns(
 ): (RecordColumn | null)[] {
   return [...mapping.entries].map(([header, { place }]) => {
     const index = headers.indexOf(header);
+    if (headers.lastIndexOf(header) > index) {
+      return report(findings, place, { found: header, expected: 'a header that stands once' });
+    }
     if (index >= 0) return mappedColumn(header, index, mapping, findings);
     const nearest = nearestName(header, headers);
     return report(findings, place, {

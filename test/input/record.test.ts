@@ -68,6 +68,17 @@ describe('a record', () => {
     expect(count('')).toBe(1);
   });
 
+  it('refuses a mapped header that stands twice, and a channel that does', () => {
+    const rows = '2031-03-30T01:00,1,2\n2031-03-30T02:00,1,2\n';
+    const mapping = 't: time\na: { channel: x, unit: degC }';
+    const found = (text: string, columns: string | null) =>
+      read(text, columns).findings.issues.map((issue) => issue.found);
+    expect(found(`t,a,a\n${rows}`, mapping)).toEqual(['a']);
+    expect(found(`time,a [degC],a [degF]\n${rows}`, null)).toEqual(['a']);
+    expect(found(`t,a,b\n${rows}`, `${mapping}\nb: { channel: x, unit: degC }`)).toEqual(['x']);
+    expect(found(`t,a,b\n${rows}`, mapping)).toEqual([]);
+  });
+
   it('reads a data set with headers of its own', () => {
     // NOAA hourly normals of Seattle as the npm package vega-datasets ships them.
     const data = '../../node_modules/vega-datasets/data/seattle-weather-hourly-normals.csv';
