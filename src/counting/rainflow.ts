@@ -15,6 +15,10 @@ const NEGLIGIBLE = 1e-6;
 /** Values taken through each pass at a time: small enough for the processor's first cache. */
 const BLOCK = 4096;
 
+/** Passed on within one block and no further, so all counters share them. */
+const mapped = new Float64Array(BLOCK);
+const points = new Float64Array(BLOCK);
+
 /** A series' cycles and its own bounds. */
 export interface CountedSeries extends Spectrum {
   /** Largest value, before the compression share; 0 of an empty series. */
@@ -53,8 +57,6 @@ export interface RainflowCounter {
  */
 export function createRainflow(options: { compressionShare?: number } = {}): RainflowCounter {
   const share = options.compressionShare ?? 1;
-  const mapped = share === 1 ? null : new Float64Array(BLOCK);
-  const points = new Float64Array(BLOCK);
   const state = createTurningState();
   const bounds = new Float64Array(2);
   const stack = new FloatList();
@@ -71,7 +73,7 @@ export function createRainflow(options: { compressionShare?: number } = {}): Rai
   }
 
   function pushBlock(block: Slice): void {
-    const slice = mapped === null ? block : mapCompression(block, share, mapped, bounds);
+    const slice = share === 1 ? block : mapCompression(block, share, bounds);
     const found = findTurningPoints(slice, state, points);
     closeCycles(points, found, stack, ranges);
   }
@@ -92,7 +94,7 @@ export function createRainflow(options: { compressionShare?: number } = {}): Rai
       if (!empty) closePending(stack, state.last, open, late);
       const left = open.data.subarray(0, open.length);
       const [least, most] = boundsOf(left);
-      const [min, max] = mapped === null ? [least, most] : bounds;
+      const [min, max] = share === 1 ? [least, most] : bounds;
       const smallest = Math.max(NEGLIGIBLE * (most - least), floor);
       const whole: Float64Array[] = [ranges, late].map((list) =>
         list.data.subarray(0, list.length),
@@ -117,13 +119,8 @@ export function createRainflow(options: { compressionShare?: number } = {}): Rai
   };
 }
 
-/** The block with its compression scaled, side by side in `out`; widens `bounds` by what was there before. */
-function mapCompression(
-  slice: Slice,
-  share: number,
-  out: Float64Array,
-  bounds: Float64Array,
-): Slice {
+/** The block with its compression scaled, in `mapped`; widens `bounds` by what was there before. */
+function mapCompression(slice: Slice, share: number, bounds: Float64Array): Slice {
   const { values, stride, count } = slice;
   let min = bounds[0];
   let max = bounds[1];
@@ -131,11 +128,11 @@ function mapCompression(
     const value = values[at];
     min = Math.min(min, value);
     max = Math.max(max, value);
-    out[i] = value < 0 ? share * value : value;
+    mapped[i] = value < 0 ? share * value : value;
   }
   bounds[0] = min;
   bounds[1] = max;
-  return { values: out, offset: 0, stride: 1, count };
+  return { values: mapped, offset: 0, stride: 1, count };
 }
 
 /** Copies the stack to `open` and ends the series there: its last value may close further cycles. */

@@ -35,8 +35,8 @@ const OCTAVES_UNDER = 16;
 const CELLS = 24 << CELL_BITS;
 
 /**
- * Relative error that a cell's cubic may have where it is tried. Wherever in the cell a kink lies, the error is
- * nowhere more than three times that at the two places tried.
+ * Relative error that a cell's cubic may have at the two places where it is tried. Where the curve bends sharply, at
+ * whatever place in the cell, the error is nowhere more than 3.4 times as large as there: 1e-6 is kept.
  */
 const TOLERANCE = 2e-7;
 
@@ -110,7 +110,7 @@ function sumBlock(cells: DamageCells, count: number, totals: Float64Array): void
   totals[1] += damaging;
 }
 
-/** Damage of a range outside the cells, or in one that is not smooth or not known to be so yet. */
+/** Damage of a range outside the cells, or in one without a cubic. */
 function damageOffCells(cells: DamageCells, range: number, cell: number): number {
   if (cell >= 0 && cell < CELLS && cells.tried[cell] === 0) fillCell(cells, cell);
   return exactDamage(cells.curve, range);

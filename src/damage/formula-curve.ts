@@ -51,14 +51,14 @@ function faultOf(cyclesAt: (range: number) => number, line: FormulaLine): string
   for (let i = 0; i <= TRIALS; i++) {
     const range = i === TRIALS ? to : from * (to / from) ** (i / TRIALS);
     const cycles = cyclesAt(range);
+    if (cycles > 0 && cycles < before) {
+      before = cycles;
+      continue;
+    }
     const at = `at S = ${short(range / unit)} it gives ${short(cycles)}`;
-    if (!(cycles > 0 && Number.isFinite(cycles))) {
-      return `a formula that gives a real, positive number of cycles all over its span (${at})`;
-    }
-    if (cycles >= before) {
-      return `a formula whose cycles fall as S rises all over its span (${at}, and ${short(before)} before)`;
-    }
-    before = cycles;
+    return cycles > 0 && Number.isFinite(cycles)
+      ? `a formula whose cycles fall as S rises all over its span (${at}, and ${short(before)} before)`
+      : `a formula that gives a real, positive number of cycles all over its span (${at})`;
   }
   return null;
 }
