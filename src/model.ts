@@ -143,6 +143,10 @@ export interface Run {
   readonly roles: readonly Role[];
   /** The fastener type at each position. */
   readonly fasteners: readonly Fastener[];
+  /** The type that stands where the run is fixed. */
+  readonly fixedType: Fastener;
+  /** The type that stands where it is slotted; `null` where the user named none. */
+  readonly slottedType: Fastener | null;
   readonly zone: Zone;
   /** Member temperature at which the fasteners were tightened [°C]. */
   readonly lockIn: number;

@@ -45,6 +45,8 @@ function readRun(row: SourceMap, parts: RunParts, findings: Findings): Run | nul
     positions,
     roles,
     fasteners,
+    fixedType: fixed,
+    slottedType: slotted,
     zone,
     lockIn,
     structure,

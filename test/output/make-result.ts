@@ -176,6 +176,8 @@ function makeRunResult(recipe: RunRecipe, zones: readonly Zone[], axis: RecordAx
       recipe.slotted && i > 0 ? 'slotted' : 'fixed',
     ),
     fasteners: Array.from({ length: recipe.count }, () => fastener),
+    fixedType: fastener,
+    slottedType: recipe.slotted ? fastener : null,
     zone: zones[0],
     lockIn: 15,
     structure: { zone: zones[1], expansion: 10e-6, lockIn: 12 },
