@@ -1,7 +1,7 @@
 import type { DamageTables } from '../damage/damage-table.ts';
 import { rangeBins } from '../damage/range-bins.ts';
 import type { Chain } from '../mechanics/chain.ts';
-import { followRecord } from '../mechanics/history.ts';
+import { followRecord, type History } from '../mechanics/history.ts';
 import { strainPath } from '../mechanics/strain-path.ts';
 import { traceConnection } from '../mechanics/trace.ts';
 import type { Connection, Job, Run, RunResult, Trace } from '../model.ts';
@@ -17,14 +17,53 @@ import { assessSpan, memberUse, type SpanLoad, spanSpectrum, worseSpan } from '.
 /** A force under this share of EA times the largest strain is rounding. */
 const NOISE = 1e-9;
 
+/** A run's demands, checks and verdicts, without the bins and the trace that only tables and charts show. */
+export interface RunAssessment extends Omit<RunResult, 'fastenerBins' | 'memberBins' | 'trace'> {
+  /** All that the record does to the run. */
+  readonly history: History;
+}
+
 /**
- * Takes one run through mechanics, counting, damage and checks.
+ * Takes one run through mechanics, counting, damage and checks, and adds the counted ranges in bins and the trace of
+ * its governing connection.
  *
  * @param run the run
  * @param job limits, counting settings, extremes and the record's axis
  * @param tables damage tables shared by all runs of the job
  */
 export function assessRun(run: Run, job: Job, tables: DamageTables): RunResult {
+  const { assessment, scene, spans, chain, strain } = followRun(run, job, tables);
+  const { history: _, ...facts } = assessment;
+  const { governing } = facts;
+  return {
+    ...facts,
+    ...binsOf(scene, spans, governing),
+    trace: traceOf(chain, strain, scene, spans, governing),
+  };
+}
+
+/**
+ * Takes one run through mechanics, counting, damage and checks: the light form of `assessRun`, with the same values,
+ * for comparing many changed runs.
+ *
+ * @param run the run
+ * @param job limits, counting settings, extremes and the record's axis
+ * @param tables damage tables shared by all runs of the job
+ */
+export function assessConnections(run: Run, job: Job, tables: DamageTables): RunAssessment {
+  return followRun(run, job, tables).assessment;
+}
+
+/** An assessment and what it was made from. */
+interface FollowedRun {
+  readonly assessment: RunAssessment;
+  readonly scene: RunScene;
+  readonly spans: readonly SpanLoad[];
+  readonly chain: Chain;
+  readonly strain: Float64Array;
+}
+
+function followRun(run: Run, job: Job, tables: DamageTables): FollowedRun {
   const chain = runChain(run);
   const strain = runStrain(run);
   const path = strainPath(strain);
@@ -48,25 +87,32 @@ export function assessRun(run: Run, job: Job, tables: DamageTables): RunResult {
     noise: NOISE * chain.axialStiffness * strains.reduce((m, e) => Math.max(m, Math.abs(e)), 0),
     when: (mark) => momentText(path, mark, job.axis.times, extremes),
   };
-
   const spans = counters.spans.map((_, j) => assessSpan(scene, j));
+  const assessment = assessmentOf(scene, spans, hours);
+  return { assessment, scene, spans, chain, strain };
+}
+
+function assessmentOf(
+  scene: RunScene,
+  spans: readonly SpanLoad[],
+  coveredHours: number,
+): RunAssessment {
+  const { run, history, years } = scene;
   const connections = run.roles.map((_, i) => assessConnection(scene, spans, i));
-  const governing = governingConnection(connections);
   return {
     run,
+    history,
     passes: history.passes,
     walks: history.walks,
-    driftPerYear: history.walks ? largest(history.drift) / scene.years : 0,
-    years: scene.years,
-    coveredHours: hours,
+    driftPerYear: history.walks ? largest(history.drift) / years : 0,
+    years,
+    coveredHours,
     connections,
-    governing,
+    governing: governingConnection(connections),
     largestSpanForce: Math.max(
       largest(history.countedSpans.max),
       largest(history.countedSpans.min),
     ),
-    ...binsOf(scene, spans, governing),
-    trace: traceOf(chain, strain, scene, spans, governing),
   };
 }
 
