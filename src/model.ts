@@ -151,8 +151,8 @@ export interface Run {
   /** Member temperature at which the fasteners were tightened [°C]. */
   readonly lockIn: number;
   readonly structure: Structure | null;
-  /** Member beyond the last fastener [mm]. */
-  readonly overhang: number;
+  /** Free member beyond the first and beyond the last fastener [mm]. */
+  readonly overhangs: Overhangs;
   /** Name of the line of runs that this one is part of. */
   readonly line: string | null;
   /** Joint gap at the run's right end, measured at lock-in [mm]. */
@@ -163,6 +163,12 @@ export interface Run {
   readonly addedTension: number;
   /** Design shear of each fastener from other loads, already factored [N]. */
   readonly addedShear: number;
+}
+
+/** Free member beyond the end fasteners of a run [mm]. */
+export interface Overhangs {
+  readonly left: number;
+  readonly right: number;
 }
 
 /** The structure behind a run. */

@@ -643,7 +643,8 @@ export const RUN_KEYS = {
     from: 0,
     default: '0 mm',
     example: '150 mm',
-    meaning: 'Member beyond the last fastener.',
+    meaning:
+      'Free member beyond the end fasteners; where positions start after 0, they give the left one.',
   },
   lock_in: {
     kind: 'temperature or time',

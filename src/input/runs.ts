@@ -1,4 +1,4 @@
-import type { Run } from '../model.ts';
+import type { Overhangs, Run } from '../model.ts';
 import { isInGap } from '../temperature/gaps.ts';
 import { type Findings, report } from './findings.ts';
 import { RUN_KEYS } from './keys.ts';
@@ -50,7 +50,7 @@ function readRun(row: SourceMap, parts: RunParts, findings: Findings): Run | nul
     zone,
     lockIn,
     structure,
-    overhang: values.overhang,
+    overhangs: overhangsOf(values),
     line: values.line,
     gap: values.gap,
     settingTolerance: values.setting_tolerance,
@@ -59,6 +59,12 @@ function readRun(row: SourceMap, parts: RunParts, findings: Findings): Run | nul
   };
   warnOfGap(run, time, parts.clock, findings);
   return run;
+}
+
+/** `positions` are measured from the member's left end, so the first of them is the overhang there unless it is 0. */
+function overhangsOf({ overhang, positions }: RunValues): Overhangs {
+  const first = positions?.[0] ?? 0;
+  return { left: first > 0 ? first : overhang, right: overhang };
 }
 
 /** A temperature read where the record has a long gap is a guess. */

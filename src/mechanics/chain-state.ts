@@ -1,3 +1,5 @@
+import type { Overhangs } from '../model.ts';
+
 /** What the user's run is to the chain: all per connection, so `perConnection` is already multiplied in. */
 export interface ChainSpec {
   /** EA of the member [N]. */
@@ -10,8 +12,8 @@ export interface ChainSpec {
   readonly freePlay: Float64Array;
   /** Friction force before the joint slips, g [N]; under 1 N counts as 1 N where there is free play. */
   readonly grip: Float64Array;
-  /** Free member beyond the last fastener at either end [mm]; none where not given. */
-  readonly overhang?: number;
+  /** Free member beyond the first and the last fastener [mm]; none where not given. */
+  readonly overhangs?: Overhangs;
 }
 
 /** A joint that holds: f = k·(d − s) with s at rest. A joint that bears is stuck too, at s = ±c. */
@@ -42,8 +44,7 @@ export interface Chain {
   readonly slipTangent: Float64Array;
   /** Growth of the slip force with slip, h [N/mm], that gives that tangent: k·h/(k + h). */
   readonly slipHardening: Float64Array;
-  /** Free member beyond the last fastener at either end [mm]. */
-  readonly overhang: number;
+  readonly overhangs: Overhangs;
 
   /** Mismatch strain, and how far along the record's path it was reached. */
   readonly now: Float64Array;
@@ -110,7 +111,7 @@ export function chainState(spec: ChainSpec): Chain {
     grip: spec.grip.map((g) => Math.max(g, LEAST_GRIP)),
     slipTangent,
     slipHardening: slipTangent.map((t, i) => (stiffness[i] * t) / (stiffness[i] - t)),
-    overhang: spec.overhang ?? 0,
+    overhangs: spec.overhangs ?? { left: 0, right: 0 },
     now: new Float64Array(2),
     mode: new Int8Array(count),
     movement: column(),

@@ -50,7 +50,7 @@ function writeRow(chain: Chain, values: Float64Array, at: number): void {
 
 /** Beyond the last fastener the member is free, so it strains by all of ε. */
 function writeEnds(chain: Chain, ends: Float64Array, at: number): void {
-  const free = chain.overhang * chain.now[STRAIN];
-  ends[at] = movementOf(chain, 0) - free;
-  ends[at + 1] = movementOf(chain, chain.count - 1) + free;
+  const { overhangs, now, count } = chain;
+  ends[at] = movementOf(chain, 0) - overhangs.left * now[STRAIN];
+  ends[at + 1] = movementOf(chain, count - 1) + overhangs.right * now[STRAIN];
 }

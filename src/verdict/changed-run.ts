@@ -1,4 +1,4 @@
-import type { Fastener, Role, Run } from '../model.ts';
+import type { Fastener, Overhangs, Role, Run } from '../model.ts';
 
 /**
  * The run with other roles: its fixed type where fixed, `slotted` elsewhere.
@@ -57,19 +57,20 @@ export function cutRun(run: Run, firsts: readonly number[], gap: number): Run[] 
       positions: run.positions.slice(start, end),
       roles: run.roles.slice(start, end),
       fasteners: run.fasteners.slice(start, end),
-      overhang: overhangOf(run, start, end, gap),
+      overhangs: overhangsOf(run, start, end, gap),
       line: run.line ?? run.id,
       gap: last ? run.gap : gap,
     };
   });
 }
 
-/** The longer of a piece's two overhangs: the model has one for both ends, and the longer moves further. */
-function overhangOf({ positions, overhang }: Run, start: number, end: number, gap: number): number {
-  const left = start === 0 ? overhang : (positions[start] - positions[start - 1] - gap) / 2;
-  const right =
-    end === positions.length ? overhang : (positions[end] - positions[end - 1] - gap) / 2;
-  return Math.max(left, right, 0);
+function overhangsOf(run: Run, start: number, end: number, gap: number): Overhangs {
+  const { positions, overhangs } = run;
+  const halfSpan = (i: number) => Math.max(0, (positions[i] - positions[i - 1] - gap) / 2);
+  return {
+    left: start === 0 ? overhangs.left : halfSpan(start),
+    right: end === positions.length ? overhangs.right : halfSpan(end),
+  };
 }
 
 function isComplete(fasteners: readonly (Fastener | null)[]): fasteners is Fastener[] {

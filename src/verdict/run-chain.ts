@@ -14,7 +14,7 @@ export function runChain(run: Run): Chain {
     ),
     freePlay: column((i) => fasteners[i].freePlay),
     grip: column((i) => fasteners[i].perConnection * fasteners[i].grip),
-    overhang: run.overhang,
+    overhangs: run.overhangs,
   });
 }
 

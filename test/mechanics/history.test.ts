@@ -68,11 +68,12 @@ describe('a record', () => {
   });
 
   it('moves its free ends by the free strain less what the friction squeezes', () => {
-    const [grip, strain, overhang] = [250, 1.2e-3, 150];
-    const { history } = follow({ ...slottedRun(grip, 50), overhang }, [0, strain]);
-    const out = SPACING * (2 * strain - (3 * grip) / EA) + overhang * strain;
-    expect(history.allEnds.max[1]).toBeCloseTo(out, 6);
-    expect(history.allEnds.min[0]).toBeCloseTo(-out, 6);
+    const [grip, strain] = [250, 1.2e-3];
+    const overhangs = { left: 50, right: 150 };
+    const { history } = follow({ ...slottedRun(grip, 50), overhangs }, [0, strain]);
+    const out = SPACING * (2 * strain - (3 * grip) / EA);
+    expect(history.allEnds.max[1]).toBeCloseTo(out + 150 * strain, 6);
+    expect(history.allEnds.min[0]).toBeCloseTo(-out - 50 * strain, 6);
     expect(history.allEnds.min[1]).toBeCloseTo(0, 6);
   });
 

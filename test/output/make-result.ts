@@ -181,7 +181,7 @@ function makeRunResult(recipe: RunRecipe, zones: readonly Zone[], axis: RecordAx
     zone: zones[0],
     lockIn: 15,
     structure: { zone: zones[1], expansion: 10e-6, lockIn: 12 },
-    overhang: 0,
+    overhangs: { left: 0, right: 0 },
     line: null,
     gap: null,
     settingTolerance: 2,
