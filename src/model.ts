@@ -369,7 +369,8 @@ export interface RunResult {
   /** Of the governing connection. */
   readonly fastenerBins: readonly RangeBin[];
   readonly memberBins: readonly RangeBin[];
-  readonly trace: Trace;
+  /** Reckoned when first asked for: the record is passed through once more. */
+  readonly trace: () => Trace;
 }
 
 export interface Result {

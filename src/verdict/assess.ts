@@ -35,10 +35,14 @@ export function assessRun(run: Run, job: Job, tables: DamageTables): RunResult {
   const { assessment, scene, spans, chain, strain } = followRun(run, job, tables);
   const { history: _, ...facts } = assessment;
   const { governing } = facts;
+  let trace: Trace | null = null;
   return {
     ...facts,
     ...binsOf(scene, spans, governing),
-    trace: traceOf(chain, strain, scene, spans, governing),
+    trace: () => {
+      trace ??= traceOf(chain, strain, scene, spans, governing);
+      return trace;
+    },
   };
 }
 

@@ -210,11 +210,11 @@ function makeRunResult(recipe: RunRecipe, zones: readonly Zone[], axis: RecordAx
     largestSpanForce: 30000,
     fastenerBins: makeBins(worst.shearRange, worst.fastenerDamage, fastener.curve),
     memberBins: makeBins(worst.stressRange, worst.memberDamage, run.member.curve),
-    trace: {
+    trace: () => ({
       shear: strain.map((e) => e * shear[governing]),
       spanForce: strain.map((e) => -e * shear[governing] * 1.7),
       slip: new Float64Array(strain.length),
-    },
+    }),
   };
 }
 

@@ -101,12 +101,12 @@ function temperatureSet(zone: Zone, job: Job, look: Partial<LineSet>): LineSet {
 }
 
 function shearPanel({ trace }: RunResult, job: Job): Panel {
-  return forcePanel(trace.shear, job, { name: 'Shear', axis: 'shear', colour: COLOUR.demand });
+  return forcePanel(trace().shear, job, { name: 'Shear', axis: 'shear', colour: COLOUR.demand });
 }
 
 function spanPanel({ trace }: RunResult, job: Job): Panel {
   const panel = { name: 'Span force', axis: 'span', colour: COLOUR.second };
-  const { sets, labels, title } = forcePanel(trace.spanForce, job, panel);
+  const { sets, labels, title } = forcePanel(trace().spanForce, job, panel);
   const tension: DirectLabel = {
     text: 'tension +',
     xAxis: 'x',
