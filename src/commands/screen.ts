@@ -1,5 +1,3 @@
-import { stat } from 'node:fs/promises';
-import { basename, dirname, join, resolve } from 'node:path';
 import { readJob } from '../input/job.ts';
 import type { Result } from '../model.ts';
 import type { ChartChoice } from '../output/charts/choose-charts.ts';
@@ -11,6 +9,8 @@ import { runFails } from '../output/run-fails.ts';
 import { summary } from '../output/summary/summary.ts';
 import { MANIFEST, type OutputFile, writeFiles } from '../output/write-files.ts';
 import { screen } from '../verdict/screen.ts';
+import { filesText } from './files-text.ts';
+import { reportDirectory } from './report-directory.ts';
 
 export interface ScreenOptions {
   /** Folder for the results; by default one under `reports/` with the job's name. */
@@ -39,7 +39,7 @@ export async function screenCommand(
   const job = await readJob(jobPath);
   const result = screen(job);
   const text = summary(result);
-  const directory = options.out ?? (await defaultDirectory(jobPath));
+  const directory = options.out ?? (await reportDirectory(jobPath));
   const files = await write(result, text, directory, options.charts);
   return {
     lines: [text, `Results in ${directory}: ${filesText(files)}`],
@@ -65,29 +65,10 @@ async function write(
   return [...files.map((file) => file.name), MANIFEST];
 }
 
-/** Tables by name, charts by number. */
-function filesText(files: readonly string[]): string {
-  const charts = files.filter((name) => name.endsWith('.png')).length;
-  const named = files.filter((name) => !name.endsWith('.png'));
-  return [...named, ...(charts === 0 ? [] : [charts === 1 ? '1 chart' : `${charts} charts`])].join(
-    ', ',
-  );
-}
-
 /** The canvas is loaded only where charts are wanted. */
 async function drawCharts(result: Result, choice: ChartChoice): Promise<OutputFile[]> {
   if (choice === 'none') return [];
   const { chooseCharts } = await import('../output/charts/choose-charts.ts');
   const { renderPngs } = await import('../output/png.ts');
   return renderPngs(chooseCharts(result, choice));
-}
-
-/** `reports/` and the folder's name, with the job file's name where that is not job.yaml. */
-async function defaultDirectory(jobPath: string): Promise<string> {
-  const path = resolve(jobPath);
-  if ((await stat(path)).isDirectory()) return join('reports', basename(path));
-  const folder = basename(dirname(path));
-  const name = basename(path);
-  const own = `${folder}-${name.replace(/\.[^.]*$/, '')}`;
-  return join('reports', name === 'job.yaml' ? folder : own);
 }

@@ -1,37 +1,46 @@
 import { createHash } from 'node:crypto';
-import type { Result } from '../model.ts';
+import type { Job, Result } from '../model.ts';
 import { version } from './version.ts';
 import type { OutputFile } from './write-files.ts';
 
 /**
- * manifest.json: what made the results and from what: version, hash of every input, settings in force,
- * passes of each run, and the files written with their hashes. It names no time and no place, so the
- * same job gives the same bytes.
+ * manifest.json of a screening: what made the results and from what, settings in force and passes of each run.
  *
  * @param files the files that are written with it
  */
 export function manifestJson(result: Result, files: readonly OutputFile[]): string {
-  const { job } = result;
+  const runs = result.runs.map((run) => ({
+    run: run.run.id,
+    passes: run.passes,
+    settled: !run.walks,
+    covered_hours: run.coveredHours,
+    years: run.years,
+  }));
+  return manifestText(result.job, { runs }, files);
+}
+
+/**
+ * A manifest: version, hash of every input, settings in force, what the command adds, and the files written with
+ * their hashes. It names no time and no place, so the same job gives the same bytes.
+ *
+ * @param made what the command did with the job, by key
+ * @param files the files that are written with it
+ */
+export function manifestText(job: Job, made: object, files: readonly OutputFile[]): string {
   const manifest = {
     program: 'daystrain',
     version,
     title: job.title,
     units: job.units,
     inputs: job.inputs,
-    settings: settings(result),
-    runs: result.runs.map((run) => ({
-      run: run.run.id,
-      passes: run.passes,
-      settled: !run.walks,
-      covered_hours: run.coveredHours,
-      years: run.years,
-    })),
+    settings: settings(job),
+    ...made,
     files: files.map(({ name, content }) => ({ name, sha256: sha256(content) })),
   };
   return `${JSON.stringify(manifest, null, 2)}\n`;
 }
 
-function settings({ job }: Result) {
+function settings(job: Job) {
   const { limits, counting } = job;
   return {
     design_life_years: limits.designLife,
