@@ -10,12 +10,15 @@ export function cellNumber(value: number | null, endless = 'infinite'): string {
 }
 
 /**
- * The number for a person to read: up to 3 significant digits, whole from 1,000 on.
+ * The number for a person to read: up to 3 significant digits, whole from 1,000 on, with an exponent
+ * under 0.0001.
  *
  * @param value any number; `Infinity` is `infinite`
  */
 export function shortNumber(value: number): string {
-  return Math.abs(value) >= 999.5 ? grouped(Math.round(value)) : rounded(value, 3);
+  if (Math.abs(value) >= 999.5) return grouped(Math.round(value));
+  const text = rounded(value, 3);
+  return value !== 0 && Math.abs(value) < 1e-4 ? Number(text).toExponential() : text;
 }
 
 /** The number with a comma between thousands. */

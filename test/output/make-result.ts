@@ -23,6 +23,7 @@ export interface RunRecipe {
   readonly count: number;
   /** Allowed shear range of a fastener [N]; `null` is not given. */
   readonly shearRangeLimit?: number | null;
+  readonly exempts?: boolean;
   readonly curves?: boolean;
   readonly slotted?: boolean;
   readonly walks?: boolean;
@@ -65,6 +66,18 @@ export function makeResult(recipe: ResultRecipe = {}): Result {
       staticFactor: 1.5,
     },
     counting: { residue: 'repeat', forceGate: 0, stressGate: 0 },
+    remedies: {
+      longestTravel: 20,
+      slotTravels: null,
+      slotStep: 1,
+      shortestPiece: 3000,
+      widestGap: 30,
+      gapStep: 1,
+      closestSpacing: 150,
+      slottedGripShare: 1,
+      gripSpread: 0.5,
+    },
+    unevenFriction: false,
     curves: [FASTENER_CURVE, MEMBER_CURVE],
     runs: results.map((r) => r.run),
     inputs: [{ name: 'job.yaml', sha256: 'a'.repeat(64) }],
@@ -160,8 +173,11 @@ function makeFastener(recipe: RunRecipe): Fastener {
     shearResistance: 18000,
     tensionResistance: null,
     interaction: null,
+    slottedGrip: null,
+    maySlot: true,
+    diameter: 12,
     shearRangeLimit: recipe.shearRangeLimit ?? null,
-    shearRangeRule: 'required',
+    shearRangeRule: recipe.exempts ? 'exempts' : 'required',
     curve: recipe.curves ? FASTENER_CURVE : null,
   };
 }
@@ -184,6 +200,7 @@ function makeRunResult(recipe: RunRecipe, zones: readonly Zone[], axis: RecordAx
     overhangs: { left: 0, right: 0 },
     line: null,
     gap: null,
+    joint: { cover: { kind: 'open' }, structureMovement: 0 },
     settingTolerance: 2,
     addedTension: 0,
     addedShear: 0,
@@ -267,10 +284,11 @@ function makeConnection(
     'yield range': check('yield range', 'MPa', stressRange, 240),
     'slot travel': check('slot travel', 'mm', 0.25 * i + 2, slotted ? 9 : null),
     buckling: check('buckling', 'N', shear.peak, null),
+    'joint gap': check('joint gap', 'mm', null, null),
   };
-  const checks = CHECKS.filter((name) => slotted || name !== 'slot travel').map(
-    (name) => all[name],
-  );
+  const checks = CHECKS.filter(
+    (name) => name !== 'joint gap' && (slotted || name !== 'slot travel'),
+  ).map((name) => all[name]);
   const governing = checks.reduce((a, b) =>
     (b.utilisation ?? -1) > (a.utilisation ?? -1) ? b : a,
   );

@@ -31,5 +31,6 @@ test('a number to read has 3 significant digits, and commas from 1,000 on', () =
     '1,000',
     '12,345',
   ]);
+  expect(shortNumber(0.00000455)).toBe('4.55e-6');
   expect(grouped(8760)).toBe('8,760');
 });

@@ -3,6 +3,9 @@ import type { Result } from '../../src/model.ts';
 import { summary } from '../../src/output/summary/summary.ts';
 import { makeResult } from './make-result.ts';
 
+/** The text without its line breaks. */
+const words = (text: string) => text.replace(/\s+/g, ' ');
+
 test('the summary of a made-up result, whole', () => {
   // A frozen own output, to show any change of wording; the numbers are tested elsewhere.
   expect(summary(makeResult())).toMatchSnapshot();
@@ -56,7 +59,7 @@ test('gated cycles are told with the damage that they would have done', () => {
     fastenerDamage: { ...first.fastenerDamage, gatedCycles: 1234, gatedDamage: 0.00021 },
   };
   const text = summary({ ...result, runs: [{ ...run, connections: [gated, ...others] }, ...rest] });
-  expect(text.replace(/\s+/g, ' ')).toContain(
+  expect(words(text)).toContain(
     'The gate dropped up to 1,234 cycles of a series. They would have added at most 0.00021 to a damage sum',
   );
   expect(summary(result)).not.toContain('gate');
@@ -107,4 +110,11 @@ test('alike defaults stand together', () => {
       '  - fasteners M12 slot: per_connection 1',
     ].join('\n'),
   );
+});
+
+test('over the limit of an exempting rule the missing curve is named', () => {
+  const missing = 'and no curve to judge the damage by';
+  const run = { id: 'R1', count: 21, shearRangeLimit: 3000 };
+  expect(words(summary(makeResult({ runs: [{ ...run, exempts: true }] })))).toContain(missing);
+  expect(words(summary(makeResult({ runs: [run] })))).not.toContain(missing);
 });

@@ -68,7 +68,7 @@ function title({ runs, governing }: Result): string {
   const verdict =
     failing === 0
       ? 'No run fails'
-      : `${failing} of ${runs.length} runs ${failing === 1 ? 'fails' : 'fail'}`;
+      : `${failing} of ${runs.length} ${runs.length === 1 ? 'run' : 'runs'} ${failing === 1 ? 'fails' : 'fail'}`;
   const use = utilisation(runs[governing]);
   if (use === null) return 'Nothing was checked: no limit was given';
   return `${verdict}; ${runs[governing].run.id} is used most, ${shortNumber(use)} times its limit`;

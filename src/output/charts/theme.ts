@@ -15,6 +15,7 @@ export const COLOUR = {
   paper: '#ffffff',
   demand: '#1d5c73',
   second: '#8a6d1f',
+  third: '#6a3d5c',
   limit: '#a33a22',
 } as const;
 

@@ -52,8 +52,15 @@ function failure(failing: readonly Connection[], name: CheckName, units: UnitSys
   const limit = amount(worst.limit!, quantity, units);
   const times = `${shortNumber(worst.utilisation!)} times`;
   const when = worst.when === '' ? '' : ` (${worst.when})`;
-  const text = `${name} ${demand}, limit ${limit}, ${times}${when}: ${connectionNames(failing)}`;
+  const open = damageIsOpen(failing[0], name) ? ', and no curve to judge the damage by' : '';
+  const where = connectionNames(failing);
+  const text = `${name} ${demand}, limit ${limit}, ${times}${when}${open}: ${where}`;
   return wrap(text, `  ${failing[0].run}  `);
+}
+
+/** Over the limit of a rule `exempts` a fastener's curve would decide. */
+function damageIsOpen({ fastener }: Connection, name: CheckName): boolean {
+  return name === 'shear range' && fastener.shearRangeRule === 'exempts' && fastener.curve === null;
 }
 
 function having({ connections }: RunResult, name: CheckName, status: CheckStatus): Connection[] {

@@ -35,9 +35,14 @@ function row(run: RunResult, units: UnitSystem): string[] {
   ];
 }
 
+/** More years than these say no more [years]. */
+const LONGEST_LIFE = 10_000;
+
 function life(run: RunResult): string {
   const lives = run.connections.map((c) => c.life).filter((years) => years !== null);
   if (lives.length === 0) return 'no curve';
   const shortest = Math.min(...lives);
-  return Number.isFinite(shortest) ? `${shortNumber(shortest)} years` : 'unlimited';
+  if (!Number.isFinite(shortest)) return 'unlimited';
+  if (shortest > LONGEST_LIFE) return `over ${shortNumber(LONGEST_LIFE)} years`;
+  return `${shortNumber(shortest)} years`;
 }

@@ -19,6 +19,8 @@ const axisTitles = ({ configuration }: Chart): string[] =>
     String((scale as { title?: { text?: string } }).title?.text ?? ''),
   );
 const titleOf = ({ configuration }: Chart) => String(configuration.options?.plugins?.title?.text);
+const subtitleOf = ({ configuration }: Chart) =>
+  String(configuration.options?.plugins?.subtitle?.text);
 const labelsOf = ({ configuration }: Chart) =>
   (configuration.options?.plugins?.directLabels?.labels ?? []).map((label) => label?.text);
 
@@ -95,9 +97,13 @@ test('along a run stand every shear range, its limit and each check', () => {
   expect(titleOf(chart)).toBe('R2: shear range fails at R2/1, 1.61 times its limit');
 });
 
-test('along a run without a limit the chart says so', () => {
+test('along a run the chart says where there is no limit and which role is which', () => {
   expect(labelsOf(alongChart(runs[2], job))).toContain('no limit was given');
   expect(labelsOf(alongChart(runs[1], job))).not.toContain('no limit was given');
+  expect(subtitleOf(alongChart(runs[2], job))).toContain(
+    'Filled points are fixed, open squares slotted.',
+  );
+  expect(subtitleOf(alongChart(runs[1], job))).not.toContain('slotted');
 });
 
 test('along a run each check has a look of its own without its colour', () => {
@@ -173,7 +179,7 @@ test('of many runs the overview shows the ones that are used most', () => {
   });
   const chart = overviewChart(many);
   expect(setOf(chart, 'ok').length + setOf(chart, 'fails').length).toBe(30);
-  expect(String(chart.configuration.options?.plugins?.subtitle?.text)).toContain('30 of 45 runs');
+  expect(subtitleOf(chart)).toContain('30 of 45 runs');
 });
 
 test('an infinite utilisation is drawn at the edge and told in words', () => {
