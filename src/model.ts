@@ -11,6 +11,89 @@ export const FILLED = 1;
 /** Missing in the record and bridged by a straight line, but not counted as covered. */
 export const BRIDGED = 2;
 
+/** Where and on which clock a record was taken: what the sun's place in the sky follows from. */
+export interface Site {
+  /** Degrees, north positive. */
+  readonly latitude: number;
+  /** Degrees, east positive. */
+  readonly longitude: number;
+  /** How far the record's own clock runs ahead of UTC [h], the same all year. */
+  readonly utcOffset: number;
+}
+
+/**
+ * What a sample of irradiance stands for: the mean over the step that ends at its time, over the step that starts
+ * there, or the moment itself.
+ */
+export type Stamp = 'end' | 'start' | 'instant';
+
+/** A weather file that the record was read from. */
+export interface WeatherFile {
+  /** The place as the file's header names it. */
+  readonly place: string;
+  /** First and last year that its rows name. */
+  readonly years: readonly [number, number];
+  /** The year that a typical year was set on, whose months come from several; `null` where the rows' own stand. */
+  readonly setOn: number | null;
+}
+
+/** What the sun's light on a member was reckoned from: channels by name. */
+export type LightBasis =
+  | { readonly from: 'surface'; readonly channel: string }
+  | {
+      readonly from: 'sky';
+      readonly global: string | null;
+      readonly direct: string | null;
+      readonly diffuse: string | null;
+      readonly site: Site;
+      readonly stamp: Stamp;
+      /** Where the surface faces, degrees clockwise from north, and its tilt from level [degrees]. */
+      readonly faces: number;
+      readonly albedo: number;
+      readonly sky: 'isotropic' | 'Hay-Davies';
+      /** A ledge over the member: how far it stands out and how far above it is [mm]. */
+      readonly overhang: { readonly depth: number; readonly above: number } | null;
+      /** Altitudes of the horizon at azimuths [degrees]. */
+      readonly horizon: readonly { readonly azimuth: number; readonly altitude: number }[];
+    };
+
+/** A member in sun and air: all that its temperature was reckoned from. */
+export interface SunlitBasis {
+  /** Channel of air temperature. */
+  readonly air: string;
+  readonly light: LightBasis;
+  /** Degrees from level: 0 faces up, 90 stands upright. */
+  readonly tilt: number;
+  /** Share of the sun's light that it takes in, and the surface's name where the user named one. */
+  readonly absorptance: number;
+  readonly surface: string | null;
+  readonly emissivity: number;
+  /** What it loses to the sky beside what it takes in [W/m²]. */
+  readonly skyLoss: number;
+  /** Film coefficient [W/(m²·K)], or the channel of wind that it is reckoned from. */
+  readonly film: number | { readonly wind: string };
+  /** Time constant [h], or the heat store that it follows from. */
+  readonly lag:
+    | number
+    | {
+        /** [kg/m] */
+        readonly mass: number;
+        /** [J/(kg·K)] */
+        readonly heatCapacity: number;
+        /** [mm] */
+        readonly exposedPerimeter: number;
+      };
+}
+
+/** What a zone's temperature was reckoned from where nobody measured it, one value a sample. */
+export interface Sunlit {
+  readonly basis: SunlitBasis;
+  /** [°C] */
+  readonly air: Float64Array;
+  /** On the member's surface [W/m²]. */
+  readonly irradiance: Float64Array;
+}
+
 /** A part of the building with one temperature history. */
 export interface Zone {
   readonly name: string;
@@ -20,6 +103,8 @@ export interface Zone {
   readonly standing: Uint8Array;
   /** True where the job gives the zone one temperature for all time. */
   readonly constant: boolean;
+  /** Given where the temperature was reckoned from sun and air. */
+  readonly sunlit: Sunlit | null;
 }
 
 /** The time axis that all zones share. */
@@ -85,6 +170,12 @@ export interface Fastener {
   /** Allowed shear range [N]. */
   readonly shearRangeLimit: number | null;
   readonly shearRangeRule: ShearRangeRule;
+  /** Grip of the same fastener in a slot that a remedy gives it [N]; a share of `grip` where not given. */
+  readonly slottedGrip: number | null;
+  /** Whether a remedy may put it into a slot. */
+  readonly maySlot: boolean;
+  /** Diameter of the bolt [mm]. */
+  readonly diameter: number | null;
   /** Force curve, or stress curve on the shear area. */
   readonly curve: Curve | null;
 }
@@ -157,12 +248,25 @@ export interface Run {
   readonly line: string | null;
   /** Joint gap at the run's right end, measured at lock-in [mm]. */
   readonly gap: number | null;
+  readonly joint: Joint;
   /** How far off its centre a bolt may have been set in its slot [mm]. */
   readonly settingTolerance: number;
   /** Design tension of each fastener from other loads, already factored [N]. */
   readonly addedTension: number;
   /** Design shear of each fastener from other loads, already factored [N]. */
   readonly addedShear: number;
+}
+
+/** How the gap at a run's right end is covered, and what moves behind it. */
+export interface Joint {
+  readonly cover:
+    | { readonly kind: 'open' }
+    /** Holds until the joint opens further than `lap` [mm]. */
+    | { readonly kind: 'lapped'; readonly lap: number }
+    /** Takes this share of its installed width both ways. */
+    | { readonly kind: 'sealed'; readonly movement: number };
+  /** Movement each way of a structural joint behind [mm]. */
+  readonly structureMovement: number;
 }
 
 /** Free member beyond the end fasteners of a run [mm]. */
@@ -205,6 +309,24 @@ export interface CountingSettings {
   readonly stressGate: number;
 }
 
+/** What remedies may propose, and how their slots and gaps are rounded up. */
+export interface RemedySettings {
+  /** Longest free play each way of a slot [mm]. */
+  readonly longestTravel: number;
+  /** Free plays each way that slots come in [mm], rising; `null` for any multiple of `slotStep`. */
+  readonly slotTravels: readonly number[] | null;
+  readonly slotStep: number;
+  /** Shortest fastened length between joints [mm]. */
+  readonly shortestPiece: number;
+  readonly widestGap: number;
+  readonly gapStep: number;
+  readonly closestSpacing: number;
+  /** Grip in a new slot as a share of the fastener's own, where its `slottedGrip` is not given. */
+  readonly slottedGripShare: number;
+  /** Share by which grips may lie above and below their value. */
+  readonly gripSpread: number;
+}
+
 /** A pair of temperatures that the record need not hold, for static and movement checks only. */
 export interface Extreme {
   readonly name: string;
@@ -236,6 +358,9 @@ export interface Job {
   readonly extremes: readonly Extreme[];
   readonly limits: Limits;
   readonly counting: CountingSettings;
+  readonly remedies: RemedySettings;
+  /** Whether fixed fasteners are checked for uneven friction: where the job says anything about remedies. */
+  readonly unevenFriction: boolean;
   readonly curves: readonly Curve[];
   readonly runs: readonly Run[];
   readonly inputs: readonly InputFile[];
@@ -253,6 +378,7 @@ export const CHECKS = [
   'yield range',
   'slot travel',
   'buckling',
+  'joint gap',
 ] as const;
 export type CheckName = (typeof CHECKS)[number];
 
@@ -350,6 +476,20 @@ export interface Trace {
   readonly slip: Float64Array;
 }
 
+/** How far one end of a run's member moves against the structure, both at least 0 [mm]. */
+export interface EndMovement {
+  /** Toward the neighbour: it closes the gap. */
+  readonly outward: Demand;
+  /** Away from it: it opens the gap. */
+  readonly inward: Demand;
+}
+
+/** A demand and when it arose. */
+export interface Demand {
+  readonly value: number;
+  readonly when: string;
+}
+
 export interface RunResult {
   readonly run: Run;
   /** Passes through the record until no slip changed. */
@@ -362,6 +502,8 @@ export interface RunResult {
   readonly years: number;
   readonly coveredHours: number;
   readonly connections: readonly Connection[];
+  /** Largest movements from lock-in on and at the extremes. */
+  readonly ends: { readonly left: EndMovement; readonly right: EndMovement };
   /** Index into `connections` of the one whose governing check is largest. */
   readonly governing: number;
   /** Largest magnitude of a span force in the counted pass, over all spans [N]; zero without a span. */

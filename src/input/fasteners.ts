@@ -48,6 +48,9 @@ function readFastener(row: SourceMap, curves: Library<Curve>, findings: Findings
     interaction: values.interaction,
     shearRangeLimit: shearRangeLimitOf(values),
     shearRangeRule: values.shear_range_rule,
+    slottedGrip: values.slotted_grip,
+    maySlot: values.may_slot,
+    diameter: values.diameter,
     curve,
   };
 }

@@ -13,7 +13,7 @@ import { readMembers } from './members.ts';
 import { readKeys } from './read-keys.ts';
 import { readRecordBasis } from './record-basis.ts';
 import { readRuns } from './runs.ts';
-import { readCounting, readLimits } from './settings.ts';
+import { readCounting, readLimits, readRemedies } from './settings.ts';
 import { emptyMap, placeOf, type Source, type SourceMap } from './source.ts';
 import { readTable } from './table.ts';
 import { readYaml } from './yaml.ts';
@@ -42,7 +42,8 @@ export async function readJob(path: string): Promise<Job> {
 /** The job from its mapping; `null` with a fault, which is reported. */
 async function readWhole(map: SourceMap, files: Files, findings: Findings): Promise<Job | null> {
   const { complete, values } = readKeys(JOB_KEYS, map, '', findings);
-  const part = (key: 'zones' | 'limits' | 'counting') => values[key] ?? emptyMap(map.place, key);
+  const part = (key: 'zones' | 'limits' | 'counting' | 'remedies') =>
+    values[key] ?? emptyMap(map.place, key);
   const table = async (source: Source | null | undefined) =>
     source ? readTable(source, files, findings) : [];
 
@@ -50,6 +51,7 @@ async function readWhole(map: SourceMap, files: Files, findings: Findings): Prom
   const zones = readZones(part('zones'), basis, findings);
   const limits = readLimits(part('limits'), findings);
   const counting = readCounting(part('counting'), findings);
+  const remedies = readRemedies(part('remedies'), findings);
 
   const curveRows = await readCurveRows(values.curves ?? null, files, findings);
   const curves = await readCurves(curveRows, findings);
@@ -64,7 +66,8 @@ async function readWhole(map: SourceMap, files: Files, findings: Findings): Prom
   }
   const extremes = readExtremes(await table(values.extremes), zones, runs, findings);
 
-  if (!complete || basis === null || limits === null || counting === null) return null;
+  if (!complete || basis === null || limits === null) return null;
+  if (counting === null || remedies === null) return null;
   return {
     title: values.title,
     units: values.units,
@@ -74,6 +77,8 @@ async function readWhole(map: SourceMap, files: Files, findings: Findings): Prom
     extremes,
     limits,
     counting,
+    remedies,
+    unevenFriction: values.remedies !== null,
     curves: [...curves.items.values()],
     runs,
     inputs: files.inputs,

@@ -96,6 +96,11 @@ export const JOB_KEYS = {
     meaning: 'Design life, allowed damage and factors.',
   },
   counting: { kind: 'map', example: '{ residue: half }', meaning: 'How cycles are counted.' },
+  remedies: {
+    kind: 'map',
+    example: '{ longest_travel: 15 mm }',
+    meaning: 'What may be proposed where a run fails.',
+  },
   members: { kind: 'table', required: true, example: 'members.csv', meaning: 'The members.' },
   fasteners: {
     kind: 'table',
@@ -384,6 +389,25 @@ export const FASTENER_KEYS = {
     example: '250 N',
     meaning: 'Friction force that the joint carries before it slips.',
   },
+  slotted_grip: {
+    ...FORCE,
+    from: 0,
+    needs: 'a share of `grip` where not given: `remedies.slotted_grip_share`',
+    example: '250 N',
+    meaning: 'Grip that the same fastener would have in a slot, where a remedy puts it into one.',
+  },
+  may_slot: {
+    kind: 'yes or no',
+    default: 'true',
+    example: 'false',
+    meaning: 'Whether a remedy may put it into a slot.',
+  },
+  diameter: {
+    ...LENGTH,
+    over: 0,
+    example: '12 mm',
+    meaning: "Diameter of the bolt, for a slot's length in full.",
+  },
   shear_area: {
     ...AREA,
     needs: 'required where a limit or the curve is a stress',
@@ -591,6 +615,77 @@ export const CURVE_POINT_KEYS = {
   },
 } as const satisfies KeyTable;
 
+export const REMEDY_KEYS = {
+  longest_travel: {
+    ...LENGTH,
+    over: 0,
+    default: '20 mm',
+    example: '15 mm',
+    meaning: 'Longest free play each way that a slot may be given.',
+  },
+  slot_step: {
+    ...LENGTH,
+    over: 0,
+    default: '1 mm',
+    example: '0.5 mm',
+    meaning: "A slot's free play each way is rounded up to a multiple of this.",
+  },
+  slot_travels: {
+    kind: 'lengths',
+    from: 0,
+    to: 1e4,
+    needs: '`slot_step` where not given',
+    example: '[3 mm, 9 mm, 15 mm]',
+    meaning: 'The only free plays each way that slots come in, rising.',
+  },
+  shortest_piece: {
+    ...LENGTH,
+    from: 0,
+    default: '3 m',
+    example: '6 m',
+    meaning: 'Shortest fastened length between two joints.',
+  },
+  widest_gap: {
+    ...LENGTH,
+    over: 0,
+    default: '30 mm',
+    example: '25 mm',
+    meaning: 'Widest gap that a new joint may have.',
+  },
+  gap_step: {
+    ...LENGTH,
+    over: 0,
+    default: '1 mm',
+    example: '5 mm',
+    meaning: "A new joint's gap is rounded up to a multiple of this.",
+  },
+  closest_spacing: {
+    ...LENGTH,
+    over: 0,
+    default: '150 mm',
+    example: '100 mm',
+    meaning: 'Closest spacing that may be proposed where buckling governs.',
+  },
+  slotted_grip_share: {
+    kind: 'number',
+    from: 0,
+    to: 1,
+    default: '1',
+    example: '0.5',
+    meaning:
+      "Grip of a fastener in a new slot as a share of its grip in its own hole, where its `slotted_grip` isn't given.",
+  },
+  grip_spread: {
+    kind: 'number',
+    from: 0,
+    under: 1,
+    default: '0.5',
+    example: '0.3',
+    meaning:
+      'How far grips may lie above and below their value; the fixed fasteners of a slotted run carry what the two sides then differ by.',
+  },
+} as const satisfies KeyTable;
+
 export const RUN_KEYS = {
   id: { kind: 'id', required: true, example: 'R1', meaning: 'Name of the run.' },
   member: { kind: 'name', required: true, example: 'rail', meaning: 'Its member.' },
@@ -688,6 +783,36 @@ export const RUN_KEYS = {
     example: '20 mm',
     meaning: "Joint gap at the run's right end, measured at lock-in.",
   },
+  joint: {
+    kind: 'choice',
+    choices: ['open', 'lapped', 'sealed'],
+    default: 'open',
+    example: 'sealed',
+    meaning:
+      'How the gap is covered. `open`: it must not close. `lapped`: nor open further than `lap`. `sealed`: nor move the sealant further than `sealant_movement`.',
+  },
+  lap: {
+    ...LENGTH,
+    over: 0,
+    needs: 'required with a lapped joint',
+    example: '40 mm',
+    meaning: 'How far the joint may open before the cover lets go.',
+  },
+  sealant_movement: {
+    kind: 'number',
+    over: 0,
+    to: 1,
+    needs: 'required with a sealed joint',
+    example: '0.25',
+    meaning: 'Movement that the sealant takes both ways, as a share of its installed width.',
+  },
+  structure_movement: {
+    ...LENGTH,
+    from: 0,
+    default: '0 mm',
+    example: '5 mm',
+    meaning: 'Movement each way of a structural joint behind the gap.',
+  },
   setting_tolerance: {
     ...LENGTH,
     from: 0,
@@ -730,6 +855,7 @@ export const KEY_TABLES: readonly { readonly title: string; readonly keys: KeyTa
   { title: 'extremes, each', keys: EXTREME_KEYS },
   { title: 'limits', keys: LIMITS_KEYS },
   { title: 'counting', keys: COUNTING_KEYS },
+  { title: 'remedies', keys: REMEDY_KEYS },
   { title: 'members', keys: MEMBER_KEYS },
   { title: 'fasteners', keys: FASTENER_KEYS },
   { title: 'curves', keys: CURVE_KEYS },

@@ -1,5 +1,7 @@
 import type { Fastener, Member, RecordAxis, Zone } from '../model.ts';
+import type { RUN_KEYS } from './keys.ts';
 import type { Library } from './library.ts';
+import type { Values } from './values.ts';
 
 /** What a run is put together from. */
 export interface RunParts {
@@ -15,3 +17,6 @@ export interface Clock {
   readonly axis: RecordAxis;
   readonly offset: number | null;
 }
+
+/** The keys of one run, read. */
+export type RunValues = Values<typeof RUN_KEYS>;

@@ -1,14 +1,14 @@
 import type { Overhangs, Run } from '../model.ts';
 import { isInGap } from '../temperature/gaps.ts';
 import { type Findings, report } from './findings.ts';
+import { jointOf } from './joint.ts';
 import { RUN_KEYS } from './keys.ts';
 import { lookUp, uniqueIds } from './library.ts';
 import { lockInOf, lockInTime, structureOf } from './lock-in.ts';
 import { readKeys } from './read-keys.ts';
 import { rolesOf } from './run-fasteners.ts';
-import type { Clock, RunParts } from './run-parts.ts';
+import type { Clock, RunParts, RunValues } from './run-parts.ts';
 import { givenText, givenValue, placeOf, type SourceMap } from './source.ts';
-import type { Values } from './values.ts';
 import { WARNINGS } from './warnings.ts';
 
 /** The job's runs in file order; a run with a fault is reported and left out. */
@@ -17,8 +17,6 @@ export function readRuns(rows: readonly SourceMap[], parts: RunParts, findings: 
   checkCase(ids, rows, findings);
   return rows.map((row) => readRun(row, parts, findings)).filter((run) => run !== null);
 }
-
-type RunValues = Values<typeof RUN_KEYS>;
 
 function readRun(row: SourceMap, parts: RunParts, findings: Findings): Run | null {
   const prefix = `runs ${givenText(row, 'id') ?? '?'}: `;
@@ -36,9 +34,10 @@ function readRun(row: SourceMap, parts: RunParts, findings: Findings): Run | nul
   if (!complete || findings.issues.length > before) return null;
   if (!member || !zone || !fixed || !positions || lockIn === null) return null;
   if (values.structure_zone !== null && structure === null) return null;
+  const joint = jointOf(values, row, findings);
   const roles = rolesOf(values.fixed, positions);
   const fasteners = roles.map((role) => (role === 'fixed' ? fixed : slotted));
-  if (!fasteners.every((fastener) => fastener !== null)) return null;
+  if (joint === null || !fasteners.every((fastener) => fastener !== null)) return null;
   const run: Run = {
     id: values.id,
     member,
@@ -53,6 +52,7 @@ function readRun(row: SourceMap, parts: RunParts, findings: Findings): Run | nul
     overhangs: overhangsOf(values),
     line: values.line,
     gap: values.gap,
+    joint,
     settingTolerance: values.setting_tolerance,
     addedTension: values.added_tension,
     addedShear: values.added_shear,

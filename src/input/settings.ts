@@ -1,6 +1,6 @@
-import type { CountingSettings, Limits } from '../model.ts';
+import type { CountingSettings, Limits, RemedySettings } from '../model.ts';
 import type { Findings } from './findings.ts';
-import { COUNTING_KEYS, LIMITS_KEYS } from './keys.ts';
+import { COUNTING_KEYS, LIMITS_KEYS, REMEDY_KEYS } from './keys.ts';
 import { readKeys } from './read-keys.ts';
 import type { SourceMap } from './source.ts';
 
@@ -24,4 +24,21 @@ export function readCounting(map: SourceMap, findings: Findings): CountingSettin
   if (!complete) return null;
   const { residue, force_gate: forceGate, stress_gate: stressGate } = values;
   return { residue, forceGate, stressGate };
+}
+
+/** What remedies may propose; `null` with a fault, which is reported. */
+export function readRemedies(map: SourceMap, findings: Findings): RemedySettings | null {
+  const { complete, values } = readKeys(REMEDY_KEYS, map, 'remedies.', findings);
+  if (!complete) return null;
+  return {
+    longestTravel: values.longest_travel,
+    slotTravels: values.slot_travels,
+    slotStep: values.slot_step,
+    shortestPiece: values.shortest_piece,
+    widestGap: values.widest_gap,
+    gapStep: values.gap_step,
+    closestSpacing: values.closest_spacing,
+    slottedGripShare: values.slotted_grip_share,
+    gripSpread: values.grip_spread,
+  };
 }

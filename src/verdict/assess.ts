@@ -4,10 +4,10 @@ import type { Chain } from '../mechanics/chain.ts';
 import { followRecord, type History } from '../mechanics/history.ts';
 import { strainPath } from '../mechanics/strain-path.ts';
 import { traceConnection } from '../mechanics/trace.ts';
-import type { Connection, Job, Run, RunResult, Trace } from '../model.ts';
+import type { Job, Run, RunResult, Trace } from '../model.ts';
 import { coveredHours, yearsOf } from '../temperature/gaps.ts';
 import { assessConnection, fastenerSpectrum, fastenerUse } from './connection.ts';
-import { firstLargest } from './first-largest.ts';
+import { governingConnection } from './governing-connection.ts';
 import { momentText } from './moment-text.ts';
 import { createPassCounters } from './pass-counters.ts';
 import { runChain, runExtremes, runStrain } from './run-chain.ts';
@@ -112,6 +112,7 @@ function assessmentOf(
     years,
     coveredHours,
     connections,
+    ends: endsOf(scene),
     governing: governingConnection(connections),
     largestSpanForce: Math.max(
       largest(history.countedSpans.max),
@@ -120,11 +121,14 @@ function assessmentOf(
   };
 }
 
-/** Index of the connection with the largest governing utilisation; of the largest shear range where none has one. */
-function governingConnection(connections: readonly Connection[]): number {
-  const uses = connections.map(({ governing }) => governing?.utilisation ?? 0);
-  const judged = uses.some((use) => use > 0);
-  return firstLargest(judged ? uses : connections.map(({ shearRange }) => shearRange));
+function endsOf({ history: { allEnds }, when }: RunScene): RunResult['ends'] {
+  const { max, maxMark, min, minMark } = allEnds;
+  const right = (i: number) => ({ value: Math.max(0, max[i]), when: when(maxMark[i]) });
+  const left = (i: number) => ({ value: Math.max(0, -min[i]), when: when(minMark[i]) });
+  return {
+    left: { outward: left(0), inward: right(0) },
+    right: { outward: right(1), inward: left(1) },
+  };
 }
 
 function binsOf(

@@ -3,19 +3,13 @@ import type {
   CheckName,
   CheckStatus,
   CheckUnit,
+  Demand,
   Fastener,
   Limits,
   Member,
   Role,
 } from '../model.ts';
-
 import { firstLargest } from './first-largest.ts';
-
-/** A demand and when it arose. */
-export interface Demand {
-  readonly value: number;
-  readonly when: string;
-}
 
 /** What one connection must bear: forces of one fastener, unfactored, in N, mm and MPa. */
 export interface ConnectionDemands {
@@ -141,7 +135,8 @@ function peakShear({ shearPeak, addedShear }: ConnectionDemands, limits: Limits)
   return { value: limits.staticFactor * shearPeak.value + addedShear, when: shearPeak.when };
 }
 
-function compare(
+/** A demand against a limit; `not given` where either is missing. */
+export function compare(
   check: CheckName,
   unit: CheckUnit,
   demand: Demand | null,

@@ -1,9 +1,11 @@
 import { minerDamage, type SeriesUse } from '../damage/miner.ts';
-import type { Check, Connection, Damage, Spectrum } from '../model.ts';
-import { type ConnectionDemands, checksOf, governingCheck } from './checks.ts';
+import type { Connection, Damage, Demand, Spectrum } from '../model.ts';
+import { type ConnectionDemands, checksOf } from './checks.ts';
+import { judge } from './judge.ts';
 import type { RunScene } from './run-scene.ts';
 import { scaleSpectrum } from './scale-spectrum.ts';
 import { rangeText, type SpanLoad, worseSpan } from './span-load.ts';
+import { unevenFriction } from './uneven-friction.ts';
 
 /** Counted shear ranges of one fastener of connection i [N]. */
 export function fastenerSpectrum({ run, job, counters, noise }: RunScene, i: number): Spectrum {
@@ -44,7 +46,7 @@ export function assessConnection(
     position: run.positions[i],
     fastener,
     role: run.roles[i],
-    shearPeak: demands.shearPeak.value,
+    shearPeak: shearPeakOf(scene, i).value,
     shearRange: demands.shearRange.value,
     fastenerDamage,
     stressRange: demands.stressRange.value,
@@ -56,9 +58,7 @@ export function assessConnection(
     slipPeak: history.slipPeak[i],
     slidingPerYear: history.slid[i] / years,
     bucklingUtilisation: checks.find(({ check }) => check === 'buckling')?.utilisation ?? null,
-    checks,
-    governing: governingCheck(checks),
-    verdict: checks.some(isFailed) ? 'fails' : 'ok',
+    ...judge(checks),
     remedy: '',
   };
 }
@@ -70,12 +70,8 @@ function demandsOf(
   damages: Pick<ConnectionDemands, 'memberDamagePerYear' | 'fastenerDamagePerYear'>,
 ): ConnectionDemands {
   const { run, job, history, noise, when } = scene;
-  const { countedShear, allShear } = history;
+  const { countedShear } = history;
   const range = countedShear.max[i] - countedShear.min[i];
-  const pulls = allShear.max[i] >= -allShear.min[i];
-  const peak = pulls ? allShear.max[i] : -allShear.min[i];
-  const { perConnection } = run.fasteners[i];
-  const each = (force: number) => (force > noise ? force / perConnection : 0);
   const drift = history.walks
     ? (Math.abs(history.drift[i]) / scene.years) * job.limits.designLife
     : 0;
@@ -83,13 +79,10 @@ function demandsOf(
     ...damages,
     role: run.roles[i],
     shearRange: {
-      value: each(range),
+      value: range > noise ? range / run.fasteners[i].perConnection : 0,
       when: rangeText(when, countedShear.maxMark[i], countedShear.minMark[i]),
     },
-    shearPeak: {
-      value: each(peak),
-      when: when(pulls ? allShear.maxMark[i] : allShear.minMark[i]),
-    },
+    shearPeak: unevenOr(scene, i, shearPeakOf(scene, i)),
     stressRange: worseSpan(spans, i)?.stressRange ?? { value: 0, when: '' },
     slip: { value: history.slipPeak[i] + drift, when: when(history.slipPeakMark[i]) },
     compression: weakerSpan(spans, i)?.compression ?? null,
@@ -97,6 +90,26 @@ function demandsOf(
     addedTension: run.addedTension,
     addedShear: run.addedShear,
   };
+}
+
+/** Largest |f| of one fastener of connection i from lock-in on and at the extremes [N]. */
+function shearPeakOf({ run, history, noise, when }: RunScene, i: number): Demand {
+  const { max, maxMark, min, minMark } = history.allShear;
+  const pulls = max[i] >= -min[i];
+  const peak = pulls ? max[i] : -min[i];
+  return {
+    value: peak > noise ? peak / run.fasteners[i].perConnection : 0,
+    when: when(pulls ? maxMark[i] : minMark[i]),
+  };
+}
+
+/** The peak shear of connection i, or what uneven friction may put on a fixed one where that is more. */
+function unevenOr({ run, job }: RunScene, i: number, peak: Demand): Demand {
+  if (!job.unevenFriction || run.roles[i] !== 'fixed' || !run.roles.includes('slotted'))
+    return peak;
+  const friction = unevenFriction(run, i, job.remedies.gripSpread);
+  const value = friction / run.fasteners[i].perConnection;
+  return value > peak.value ? { value, when: 'uneven friction' } : peak;
 }
 
 /** The span beside connection i that uses more of its flexural resistance, or has the larger compression. */
@@ -129,8 +142,4 @@ function perYear({ sum }: Damage, years: number): number | null {
 function lifeOf(damages: readonly (number | null)[], allowed: number): number | null {
   const given = damages.filter((damage) => damage !== null);
   return given.length === 0 ? null : allowed / Math.max(...given);
-}
-
-function isFailed({ status }: Check): boolean {
-  return status === 'fail';
 }

@@ -1,7 +1,6 @@
 import { minerDamage, type SeriesUse } from '../damage/miner.ts';
 import { bucklingResistance } from '../mechanics/buckling.ts';
-import type { Damage, Member, Spectrum } from '../model.ts';
-import type { Demand } from './checks.ts';
+import type { Damage, Demand, Member, Spectrum } from '../model.ts';
 import type { RunScene } from './run-scene.ts';
 import { scaleSpectrum } from './scale-spectrum.ts';
 

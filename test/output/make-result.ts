@@ -110,7 +110,8 @@ function makeZone(name: string, axis: RecordAxis, ...shape: [number, number, num
       mean - season * Math.cos((2 * Math.PI * days) / 365) + day * sky * daily + 2 * Math.sin(days)
     );
   });
-  return { name, temperature, standing: new Uint8Array(temperature.length), constant: false };
+  const standing = new Uint8Array(temperature.length);
+  return { name, temperature, standing, constant: false, sunlit: null };
 }
 
 const FASTENER_CURVE: Curve = {
