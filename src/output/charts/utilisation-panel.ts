@@ -1,8 +1,8 @@
-import type { PointStyle } from 'chart.js';
 import { CHECKS, type CheckName, type Connection, type Job } from '../../model.ts';
 import { shortNumber } from '../number-text.ts';
 import { edgeLabel, MOST_SHAPES, place, reach } from './along.ts';
 import type { Point } from './chart.ts';
+import { CHECK_LOOKS } from './check-looks.ts';
 import { roundTicks } from './log-ticks.ts';
 import { COLOUR, DASH, line } from './theme.ts';
 
@@ -16,7 +16,7 @@ const LEAST = 0.01;
 export function utilisationPanel(connections: readonly Connection[], job: Job) {
   const checks = CHECKS.flatMap((name) => {
     const points = connections.flatMap((connection) => usePoint(connection, name, job));
-    return points.length === 0 ? [] : [{ name, look: LOOKS[name], points }];
+    return points.length === 0 ? [] : [{ name, look: CHECK_LOOKS[name], points }];
   });
   const all = checks.flatMap(({ points }) => points.map(({ y }) => y));
   const most = Math.max(1, ...all.filter(Number.isFinite));
@@ -72,26 +72,4 @@ function usePoint(connection: Connection, name: CheckName, job: Job): Point[] {
   const check = connection.checks.find((one) => one.check === name);
   if (check === undefined || (check.status !== 'pass' && check.status !== 'fail')) return [];
   return [{ x: place(connection, job), y: check.utilisation ?? 0 }];
-}
-
-interface Look {
-  readonly borderColor: string;
-  readonly borderDash: number[];
-  readonly pointStyle: PointStyle;
-}
-
-/** One look a check: shape and dash tell them apart without the colour. */
-const LOOKS: Record<CheckName, Look> = {
-  'member damage': look(COLOUR.third, 'solid', 'triangle'),
-  'fastener damage': look(COLOUR.third, 'dotted', 'rectRot'),
-  'shear range': look(COLOUR.demand, 'solid', 'circle'),
-  'peak shear': look(COLOUR.demand, 'dashed', 'rect'),
-  combined: look(COLOUR.demand, 'dotted', 'cross'),
-  'yield range': look(COLOUR.second, 'solid', 'star'),
-  'slot travel': look(COLOUR.second, 'dashed', 'crossRot'),
-  buckling: look(COLOUR.ink, 'chain', 'rectRounded'),
-};
-
-function look(borderColor: string, dash: keyof typeof DASH, pointStyle: PointStyle): Look {
-  return { borderColor, borderDash: DASH[dash], pointStyle };
 }
