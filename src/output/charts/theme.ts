@@ -7,7 +7,7 @@ export const HEIGHT = 675;
 
 export const FONT = 'IBM Plex Sans';
 
-/** Dark on white; every pair differs in lightness too, so that a grey print still tells them apart. */
+/** Dark on white; no meaning hangs on the colour alone. */
 export const COLOUR = {
   ink: '#22303a',
   faint: '#6b7780',
