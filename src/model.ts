@@ -464,7 +464,8 @@ export interface Connection {
   readonly remedy: string;
 }
 
-export type Verdict = 'ok' | 'fails';
+/** What to do at a connection; `fails` where no remedy was looked for. */
+export type Verdict = 'ok' | 'slot' | 'joint' | 'rework' | 'fails';
 
 /** Forces of one run at every sample of the counted pass, for one connection: what a chart draws. */
 export interface Trace {
@@ -513,6 +514,49 @@ export interface RunResult {
   readonly memberBins: readonly RangeBin[];
   /** Reckoned when first asked for: the record is passed through once more. */
   readonly trace: () => Trace;
+  /** `null` where the run passes, or where no remedy was looked for. */
+  readonly remedy: Remedy | Rework | null;
+}
+
+/** A changed run that was screened again and passes every check that was given. */
+export interface Remedy {
+  readonly kind: 'slots' | 'joints' | 'spacing';
+  /** The pieces from the left; one where the run is not cut. */
+  readonly pieces: readonly RemediedPiece[];
+  readonly joints: number;
+  /** Slotted fasteners in all pieces. */
+  readonly slots: number;
+  /** Fasteners more than before. */
+  readonly added: number;
+  /** Width of the new joints at lock-in [mm]; `null` without one. */
+  readonly gap: number | null;
+  /** Largest utilisation of any check, before and after. */
+  readonly utilisationBefore: number;
+  readonly utilisation: number;
+}
+
+/** One piece of a remedied run, as it would be drawn. */
+export interface RemediedPiece {
+  readonly run: Run;
+  readonly connections: readonly Connection[];
+  readonly governing: number;
+}
+
+/** No remedy passes: what stays above its limit, and which single change of the run as drawn would pass. */
+export interface Rework {
+  readonly kind: 'rework';
+  readonly check: Check;
+  /** The connection where it does, such as `R11/1`. */
+  readonly at: string;
+  readonly changes: readonly SingleChange[];
+}
+
+/** One quantity of the run and the value from which, or up to which, it would pass alone. */
+export interface SingleChange {
+  readonly quantity: 'grip' | 'free play' | 'shear range limit' | 'member area' | 'stiffness';
+  readonly bound: 'at least' | 'at most';
+  /** [N, mm, mm² or N/mm]. */
+  readonly value: number;
 }
 
 export interface Result {

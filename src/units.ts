@@ -12,11 +12,18 @@ export type Quantity =
   | 'force'
   | 'stress'
   | 'stiffness'
+  | 'torque'
   | 'expansion'
   | 'temperature'
   | 'temperature difference'
   | 'years'
-  | 'hours';
+  | 'hours'
+  | 'irradiance'
+  | 'speed'
+  | 'film coefficient'
+  | 'angle'
+  | 'mass per length'
+  | 'heat capacity';
 
 export type UnitSystem = 'SI' | 'US';
 
@@ -46,6 +53,7 @@ const QUANTITIES: Record<Quantity, QuantityUnits> = {
   force: { name: 'a force', base: 'N', SI: 'kN', US: 'kip' },
   stress: { name: 'a stress', base: 'MPa', SI: 'MPa', US: 'ksi' },
   stiffness: { name: 'a stiffness', base: 'N/mm', SI: 'kN/mm', US: 'kip/in' },
+  torque: { name: 'a torque', base: 'N*mm', SI: 'N*m', US: 'ft*lbf' },
   expansion: {
     name: 'an expansion',
     base: 'K^-1',
@@ -61,6 +69,22 @@ const QUANTITIES: Record<Quantity, QuantityUnits> = {
   },
   years: { name: 'a time', base: 'year', SI: 'year', US: 'year' },
   hours: { name: 'a time', base: 'h', SI: 'h', US: 'h' },
+  irradiance: { name: 'an irradiance', base: 'W/m^2', SI: 'W/m^2', US: 'W/m^2' },
+  speed: { name: 'a speed', base: 'm/s', SI: 'm/s', US: 'ft/s' },
+  'film coefficient': {
+    name: 'a film coefficient',
+    base: 'W/m^2/K',
+    SI: 'W/m^2/K',
+    US: 'BTU/h/ft^2/degF',
+  },
+  angle: { name: 'an angle', base: 'deg', SI: 'deg', US: 'deg' },
+  'mass per length': { name: 'a mass per length', base: 'kg/m', SI: 'kg/m', US: 'lb/ft' },
+  'heat capacity': {
+    name: 'a heat capacity',
+    base: 'J/kg/K',
+    SI: 'J/kg/K',
+    US: 'BTU/lb/degF',
+  },
 };
 
 /** What each temperature scale reads at 0 °C. */
@@ -77,13 +101,16 @@ const ICE_POINT: Readonly<Record<string, number>> = { degC: 0, K: 273.15, degF: 
  */
 export function readQuantity(text: string, quantity: Quantity, columnUnit?: string): Reading {
   const { number, unit } = split(text);
-  if (number === null) return { value: null, ...commaHint(text) };
+  if (number === null) return { value: null, ...numberHint(text) };
   const slip = SLIPS.find(([wrong]) => wrong.test(unit === '' ? (columnUnit ?? '') : unit));
   if (slip !== undefined) return { value: null, hint: slip[1] };
   const unitText = unit === '' ? columnUnit : unit;
-  if (unitText === undefined || /^\d/.test(unit)) return { value: null };
-  const value = converter(unitText, quantity)?.(number) ?? null;
-  return { value: value !== null && Number.isFinite(value) ? value : null };
+  // «6 5 mm» is no 30 mm.
+  const known = /^\d/.test(unit) ? null : converter(unitText ?? '', quantity);
+  const value = known?.(number) ?? null;
+  return value !== null && Number.isFinite(value)
+    ? { value }
+    : { value: null, ...numberHint(text) };
 }
 
 /**
@@ -118,6 +145,15 @@ export function quantityOf<Q extends Quantity>(text: string, among: readonly Q[]
   return among.find((quantity) => unit !== '' && converter(unit, quantity) !== null) ?? null;
 }
 
+/** True where the text is a unit alone, such as `kN/mm`, or one with a power of ten, such as `1e-6/K`. */
+export function isUnit(text: string): boolean {
+  const { number, unit } = split(text);
+  if (unit === '' || (number !== null && number !== 1 && !/^1e/.test(plainCharacters(text)))) {
+    return false;
+  }
+  return quantityOf(text, Object.keys(QUANTITIES) as Quantity[]) !== null;
+}
+
 /** Reads a number without a unit, such as `1.35`, `1e4` or `60 %` (0.6); `null` where it is none. */
 export function readNumber(text: string): number | null {
   const { number, unit } = split(text);
@@ -126,19 +162,18 @@ export function readNumber(text: string): number | null {
   return unit === '%' ? number / 100 : null;
 }
 
-/**
- * A value in the units of the results.
- * @param value in base units (a temperature in °C)
- */
-export function toUnits(value: number, quantity: Quantity, system: UnitSystem): number {
+/** The unit that results are written in: its name as it stands in a column's header, and values in it. */
+export function resultUnit(quantity: Quantity, system: UnitSystem): ResultUnit {
   const unit = QUANTITIES[quantity][system];
   const size = sizeOf(unit, quantity) as number;
-  return quantity === 'temperature' ? value / size + ICE_POINT[unit] : value / size;
+  const zero = quantity === 'temperature' ? ICE_POINT[unit] : 0;
+  return { name: unit.replace('deg', '°'), from: (value) => value / size + zero };
 }
 
-/** The unit that `toUnits` writes in, as it stands in a column's header. */
-export function unitName(quantity: Quantity, system: UnitSystem): string {
-  return QUANTITIES[quantity][system].replace('deg', '°');
+interface ResultUnit {
+  readonly name: string;
+  /** A value in base units (a temperature in °C), in this unit. */
+  readonly from: (value: number) => number;
 }
 
 /** Units that mathjs knows and nobody here means, each with what to write. */
@@ -148,12 +183,19 @@ const SLIPS: readonly (readonly [RegExp, string])[] = [
   [/\bMm\b/, 'Mm is a thousand kilometres: write mm.'],
 ];
 
+const FEET_AND_INCHES = /^(\d+)\s*(?:ft|['′])[ -]*(\d[\d ./-]*?)\s*in$/;
 const NUMBER = /^([+-]?(?:\d+\.?\d*|\.\d+)(?:e[+-]?\d+)?)(?![\d.,])\s*(.*)$/i;
 const FRACTION = /^(?:(\d+)[ -])?(\d+)\/(\d+)(?![\d.,/])\s*(.*)$/;
 
 /** Text cut into its number and its unit, both in plain characters; no number is `null`. */
 function split(text: string): { number: number | null; unit: string } {
   const plain = plainCharacters(text);
+  const feet = FEET_AND_INCHES.exec(plain);
+  if (feet !== null) {
+    const inches = split(`${feet[2]} in`);
+    if (inches.number === null || inches.unit !== 'in') return { number: null, unit: '' };
+    return { number: 12 * Number(feet[1]) + inches.number, unit: 'in' };
+  }
   const fraction = FRACTION.exec(plain);
   if (fraction !== null) {
     const [, whole = '0', above, below, unit] = fraction;
@@ -182,14 +224,41 @@ function plainCharacters(text: string): string {
     .replace(/(?<=\d)\s*[*×x]\s*10\^/, 'e')
     .replace(/^10\^/, '1e')
     .replace(/(?:°|deg)\s*([CF])\b/g, 'deg$1')
-    .replace(/"$/, ' in')
+    .replace(/°/g, ' deg')
+    .replace(/\bBtu\b/g, 'BTU')
+    .replace(/["″]$/, ' in')
+    .replace(/(?<=\d)['′]$/, ' ft')
+    .replace(/\b(k?N)m\b/g, '$1*m')
+    .replace(/\b(ft|in)[- ]?lbf?\b|\blbf?[- ](ft|in)\b/g, '$1$2*lbf')
     .replace(/\byrs?\b/, 'year')
     .trim();
 }
 
-function commaHint(text: string): { hint?: string } {
-  return /\d,\d/.test(text) ? { hint: 'Write numbers with a point and no comma: 1250.5.' } : {};
+/** What may be meant by a text that does not begin with a plain number, and how to write it. */
+function numberHint(text: string): { hint?: string } {
+  const hint = NUMBER_HINTS.find(([looks]) => looks.test(text));
+  if (hint === undefined) return {};
+  return { hint: text.replace(hint[0], hint[1]) };
 }
+
+/** Each a whole text, and what is said of it. */
+const NUMBER_HINTS: readonly (readonly [RegExp, string])[] = [
+  [/^#.*$/s, 'A formula of the spreadsheet has failed there: mend it and save the file again.'],
+  [
+    /^\d{1,2}[-. ](?:jan|feb|mar|apr|may|jun|jul|aug|sep|oct|nov|dec)\w*$/i,
+    'The spreadsheet took a fraction for a date: format the cell as text, or write a decimal number.',
+  ],
+  [
+    /^([+-]?\d{1,3}),(\d{3})(?![\d,.]).*$/s,
+    'The comma may part thousands or decimals: write $1$2 or $1.$2, whichever is meant.',
+  ],
+  [/^([+-]?\d+),(\d+)(?![\d,.]).*$/s, 'Write decimals with a point: $1.$2.'],
+  [/^[+-]?[\d.]+,[\d.,]+.*$/s, 'Write numbers with a point and no comma: 1250.5.'],
+  [
+    /^([+-]?\d{1,3})[ \u00a0\u202f\u2009'’](\d{3})(?![\d,.]).*$/s,
+    'Write numbers without a space or a mark between the thousands: $1$2.',
+  ],
+];
 
 const sizes = new Map<string, number | null>();
 
@@ -263,6 +332,8 @@ function Unit(): MathUnitClass {
   });
   unitClass.createUnit(
     {
+      mph: { definition: '1 mile/h' },
+      knot: { definition: '1852 m/h', aliases: ['knots'] },
       kip: { definition: '1000 lbf', aliases: ['kips'] },
       psi: { definition: '1 lbf/in^2' },
       ksi: { definition: '1000 lbf/in^2' },

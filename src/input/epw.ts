@@ -1,4 +1,4 @@
-import type { Site } from '../temperature/site.ts';
+import type { Site } from '../model.ts';
 import { type Dating, dateRows } from './epw-dates.ts';
 import { columnOf, type EpwColumns, readRows } from './epw-rows.ts';
 import { type Findings, report } from './findings.ts';

@@ -1,4 +1,5 @@
 import type { Quantity } from '../units.ts';
+import { OVERHANG_KEYS, SITE_KEYS, SUN_KEYS, SUNLIT_ZONE_KEYS, WARMING_KEYS } from './sun-keys.ts';
 
 /** How a value is written and read. A quantity is a number with its unit. */
 export type Kind =
@@ -85,6 +86,11 @@ export const JOB_KEYS = {
     example: '{ deck: { column: deck } }',
     meaning: 'The zones, each under its name.',
   },
+  warming: {
+    kind: 'map',
+    example: '{ add: 2 K }',
+    meaning: 'A what-if: all runs are assessed for warmer zones too, and the results say both.',
+  },
   extremes: {
     kind: 'list',
     example: '[{ name: hot, deck: 25 degC }]',
@@ -122,7 +128,28 @@ export const RECORD_KEYS = {
     required: true,
     example: 'record.csv',
     meaning:
-      'CSV with a column `time` (2031-01-01T00:00) and one column a channel with its unit in the header, such as `deck [degC]`.',
+      'CSV with a column `time` (2031-01-01T00:00) and one column a channel with its unit in the header, such as `deck [degC]`; or an hourly weather file in the EPW layout, with the channels `air`, `global`, `direct`, `diffuse` and `wind`.',
+  },
+  layout: {
+    kind: 'choice',
+    choices: ['CSV', 'EPW'],
+    needs: 'EPW where the name of the file ends in .epw, else CSV',
+    example: 'EPW',
+    meaning: 'How the file is laid out.',
+  },
+  site: {
+    kind: 'map',
+    needs: 'for the sun of a CSV; a weather file names its own',
+    example: '{ latitude: 45.2 deg, longitude: -7.5 deg, utc_offset: 0 h }',
+    meaning: 'Where and on which clock the record was taken.',
+  },
+  stamp: {
+    kind: 'choice',
+    choices: ['end', 'start', 'instant'],
+    needs: 'for the sun of a CSV; hours of a weather file end at their times',
+    example: 'end',
+    meaning:
+      'What a row of irradiance and wind is: the mean of the step that ends at its time, of the step that starts there, or a moment.',
   },
   gaps: {
     kind: 'map',
@@ -170,16 +197,17 @@ export const COLUMN_KEYS = {
 export const ZONE_KEYS = {
   column: {
     kind: 'name',
-    needs: 'this or `constant`',
+    needs: 'this, `constant` or `air`',
     example: 'rail_south',
-    meaning: 'Channel of the record.',
+    meaning: 'Channel of temperature in the record.',
   },
   constant: {
     ...TEMPERATURE,
-    needs: 'this or `column`',
+    needs: 'this, `column` or `air`',
     example: '21 degC',
     meaning: 'One temperature for all time.',
   },
+  ...SUNLIT_ZONE_KEYS,
 } as const satisfies KeyTable;
 
 export const EXTREME_KEYS = {
@@ -256,6 +284,13 @@ export const COUNTING_KEYS = {
     default: '0 MPa',
     example: '2 MPa',
     meaning: 'Stress ranges of a member under this are dropped, and said to be.',
+  },
+  extremes_cycle: {
+    kind: 'yes or no',
+    default: 'no',
+    example: 'yes',
+    meaning:
+      'Whether one cycle a year between the hottest and the coldest of `extremes` is added to the damage.',
   },
 } as const satisfies KeyTable;
 
@@ -851,7 +886,11 @@ export const KEY_TABLES: readonly { readonly title: string; readonly keys: KeyTa
   { title: 'record', keys: RECORD_KEYS },
   { title: 'record.gaps', keys: GAPS_KEYS },
   { title: 'record.columns, each column', keys: COLUMN_KEYS },
+  { title: 'record.site', keys: SITE_KEYS },
   { title: 'zones, each zone', keys: ZONE_KEYS },
+  { title: 'zones, the sun of a zone', keys: SUN_KEYS },
+  { title: 'zones, the overhang of a zone', keys: OVERHANG_KEYS },
+  { title: 'warming', keys: WARMING_KEYS },
   { title: 'extremes, each', keys: EXTREME_KEYS },
   { title: 'limits', keys: LIMITS_KEYS },
   { title: 'counting', keys: COUNTING_KEYS },

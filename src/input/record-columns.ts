@@ -1,11 +1,15 @@
 import type { Place } from '../issue.ts';
-import { converter } from '../units.ts';
+import { converter, quantityOf } from '../units.ts';
 import { type Findings, report } from './findings.ts';
 import { readHeader } from './header.ts';
 import { COLUMN_KEYS } from './keys.ts';
 import { nearestName } from './nearest-name.ts';
 import { readKeys } from './read-keys.ts';
 import { placeOf, type SourceMap } from './source.ts';
+
+/** What a channel of the record may measure. */
+export const CHANNEL_QUANTITIES = ['temperature', 'irradiance', 'speed'] as const;
+export type ChannelQuantity = (typeof CHANNEL_QUANTITIES)[number];
 
 /** One column of the record that is read. */
 export interface RecordColumn {
@@ -15,8 +19,21 @@ export interface RecordColumn {
   readonly index: number;
   /** The header as it stands in the file. */
   readonly header: string;
-  /** The column's numbers in °C; `null` for the time. */
-  readonly toCelsius: ((value: number) => number) | null;
+  /** `null` for the time. */
+  readonly measure: Measure | null;
+}
+
+/** What a channel measures, and its numbers in °C, W/m² or m/s. */
+export interface Measure {
+  readonly quantity: ChannelQuantity;
+  readonly convert: (value: number) => number;
+}
+
+/** What a unit measures; `null` where it is none that a channel may have. */
+function measureOf(unit: string): Measure | null {
+  const quantity = quantityOf(unit, CHANNEL_QUANTITIES);
+  const convert = quantity === null ? null : converter(unit, quantity);
+  return quantity === null || convert === null ? null : { quantity, convert };
 }
 
 /**
@@ -43,7 +60,7 @@ export function recordColumns(
       : mappedColumns(headers, mapping, findings);
   const found = columns.filter((column) => column !== null);
   const names = found.map(({ name }) => name);
-  const time = found.filter(({ toCelsius }) => toCelsius === null);
+  const time = found.filter(({ measure }) => measure === null);
   const twice = found.find(({ name }, i) => names.indexOf(name) !== i);
   if (twice !== undefined) {
     const place = mapping?.place ?? header(twice.index);
@@ -52,7 +69,7 @@ export function recordColumns(
     reportNoTime(headers, mapping?.place ?? header(0), findings);
   }
   if (findings.issues.length > before) return null;
-  return [...time, ...found.filter(({ toCelsius }) => toCelsius !== null)];
+  return [...time, ...found.filter(({ measure }) => measure !== null)];
 }
 
 function plainColumn(
@@ -62,12 +79,13 @@ function plainColumn(
   findings: Findings,
 ): RecordColumn | null {
   const { name, unit } = readHeader(text);
-  if (name === 'time') return { name, index, header: text, toCelsius: null };
-  const toCelsius = converter(unit ?? '', 'temperature');
-  if (name !== '' && toCelsius !== null) return { name, index, header: text, toCelsius };
+  if (name === 'time') return { name, index, header: text, measure: null };
+  const measure = measureOf(unit ?? '');
+  if (name !== '' && measure !== null) return { name, index, header: text, measure };
   return report(findings, place, {
     found: text,
-    expected: 'a channel with its unit of temperature in brackets, such as deck [degC]',
+    expected:
+      'a channel with its unit in brackets, such as deck [degC], global [W/m^2] or wind [m/s]',
     hint: 'For a file with headers of its own, name its columns under record.columns.',
   });
 }
@@ -100,7 +118,7 @@ function mappedColumn(
 ): RecordColumn | null {
   const value = mapping.entries.get(header)?.value;
   if (value?.type === 'text' && value.text === 'time') {
-    return { name: 'time', index, header, toCelsius: null };
+    return { name: 'time', index, header, measure: null };
   }
   if (value?.type !== 'map') {
     const expected = 'time, or a mapping such as { channel: air, unit: degC }';
@@ -111,10 +129,10 @@ function mappedColumn(
   }
   const { complete, values } = readKeys(COLUMN_KEYS, value, '', findings);
   if (!complete) return null;
-  const toCelsius = converter(values.unit ?? readHeader(header).unit ?? '', 'temperature');
-  if (toCelsius !== null) return { name: values.channel, index, header, toCelsius };
+  const measure = measureOf(values.unit ?? readHeader(header).unit ?? '');
+  if (measure !== null) return { name: values.channel, index, header, measure };
   const found = values.unit === null ? {} : { found: values.unit };
-  const expected = 'a unit of temperature, such as degC, degF or K';
+  const expected = 'a unit of temperature, irradiance or speed, such as degC, W/m^2 or m/s';
   return report(findings, placeOf(value, 'unit'), { ...found, expected });
 }
 

@@ -4,7 +4,7 @@ import { reportCsvFault } from './csv-fault.ts';
 import { type Findings, report } from './findings.ts';
 import { readIsoTime } from './iso-time.ts';
 import { COLDEST, HOTTEST } from './keys.ts';
-import { type RecordColumn, recordColumns } from './record-columns.ts';
+import { type ChannelQuantity, type RecordColumn, recordColumns } from './record-columns.ts';
 import { type RepeatedFaults, repeatedFaults } from './repeated-faults.ts';
 import type { SourceMap } from './source.ts';
 
@@ -12,8 +12,10 @@ import type { SourceMap } from './source.ts';
 export interface RecordTable {
   /** Time of each row [ms since 1970 on the record's own clock]. */
   readonly times: Float64Array;
-  /** Temperature in each row [°C], `NaN` where the cell is blank. */
+  /** Value in each row [°C, W/m² or m/s], `NaN` where the cell is blank. */
   readonly channels: ReadonlyMap<string, Float64Array>;
+  /** What each channel measures. */
+  readonly quantities: ReadonlyMap<string, ChannelQuantity>;
   /** Offset of the record's clock from UTC [ms]; `null` where the record names none. */
   readonly offset: number | null;
 }
@@ -54,7 +56,9 @@ export function readRecord(
     (column) => [column.name, readChannel(body, column, file, faults)] as const,
   );
   faults.finish();
-  return findings.issues.length > before ? null : { ...clock, channels: new Map(channels) };
+  if (findings.issues.length > before) return null;
+  const quantities = others.map(({ name, measure }) => [name, measure!.quantity] as const);
+  return { ...clock, channels: new Map(channels), quantities: new Map(quantities) };
 }
 
 interface Row {
@@ -133,6 +137,18 @@ const TIME_FAULTS = {
   earlier: { expected: 'a time after the row above' },
 } as const;
 
+/** Values beyond these are mostly a logger's mark for a fault [°C, W/m², m/s]. */
+const BOUNDS: Readonly<Record<ChannelQuantity, { from: number; to: number; words: string }>> = {
+  temperature: {
+    from: COLDEST,
+    to: HOTTEST,
+    words: `a temperature from ${COLDEST} to ${HOTTEST} degC`,
+  },
+  // a pyranometer reads a little under zero at night
+  irradiance: { from: -100, to: 2000, words: 'an irradiance from -100 to 2000 W/m^2' },
+  speed: { from: 0, to: 150, words: 'a speed from 0 to 150 m/s' },
+};
+
 const NUMBER = /^\s*[+-]?(?:\d+\.?\d*|\.\d+)(?:[eE][+-]?\d+)?\s*$/;
 
 function readChannel(
@@ -141,17 +157,19 @@ function readChannel(
   file: string,
   faults: RepeatedFaults,
 ): Float64Array {
-  const { index, toCelsius } = column;
+  const { index } = column;
+  const { quantity, convert } = column.measure!;
+  const { from, to, words } = BOUNDS[quantity];
   const values = new Float64Array(rows.length).fill(Number.NaN);
   for (let i = 0; i < rows.length; i++) {
     const text = rows[i].cells[index] ?? '';
     if (text.trim() === '') continue;
-    const value = NUMBER.test(text) && toCelsius !== null ? toCelsius(Number(text)) : Number.NaN;
-    if (value >= COLDEST && value <= HOTTEST) values[i] = value;
+    const value = NUMBER.test(text) ? convert(Number(text)) : Number.NaN;
+    if (value >= from && value <= to) values[i] = value;
     else {
       const expected = Number.isNaN(value)
         ? 'a number, or a blank where there is none'
-        : `a temperature from ${COLDEST} to ${HOTTEST} degC, or a blank where there is none`;
+        : `${words}, or a blank where there is none`;
       faults.add(`value ${column.name}`, placeIn(rows[i], column, file), { found: text, expected });
     }
   }

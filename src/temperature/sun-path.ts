@@ -1,7 +1,6 @@
 import { getPosition } from 'suncalc';
-import type { RecordAxis } from '../model.ts';
+import type { RecordAxis, Site, Stamp } from '../model.ts';
 import { extraterrestrialNormal } from './extraterrestrial.ts';
-import type { Site, Stamp } from './site.ts';
 
 /**
  * The sun over a record. Each column has one value a sample; (east, north, up) is the unit vector towards the sun,

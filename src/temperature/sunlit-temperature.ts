@@ -1,6 +1,5 @@
-import type { RecordAxis } from '../model.ts';
+import type { RecordAxis, Stamp } from '../model.ts';
 import { filmFromWind } from './film-coefficient.ts';
-import type { Stamp } from './site.ts';
 import { type SurfaceRadiation, solAirExcess } from './sol-air.ts';
 import { type HeatStore, lagStep, timeConstant } from './thermal-lag.ts';
 

@@ -15,7 +15,7 @@ export function zoneOf(
   axis: RecordAxis,
   fillUpTo: number,
 ): Zone {
-  return { name, ...bridgeGaps(values, axis, fillUpTo), constant: false };
+  return { name, ...bridgeGaps(values, axis, fillUpTo), constant: false, sunlit: null };
 }
 
 /** A zone with one temperature [°C] at every sample. */
@@ -26,6 +26,7 @@ export function constantZone(name: string, temperature: number, axis: RecordAxis
     temperature: new Float64Array(samples).fill(temperature),
     standing: new Uint8Array(samples),
     constant: true,
+    sunlit: null,
   };
 }
 

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import type { Site } from '../../src/temperature/site.ts';
+import type { Site } from '../../src/model.ts';
 import { type SunPath, sunPath } from '../../src/temperature/sun-path.ts';
 import { SPA_DAYS, SPA_EXAMPLE, TEXTBOOK_POSITIONS } from '../reference/sun-position.ts';
 import { axisOf } from '../support/clear-day.ts';
