@@ -224,6 +224,7 @@ function makeRunResult(recipe: RunRecipe, zones: readonly Zone[], axis: RecordAx
     years: 1,
     coveredHours: axis.times.length,
     connections,
+    ends: { left: END, right: END },
     governing,
     largestSpanForce: 30000,
     fastenerBins: makeBins(worst.shearRange, worst.fastenerDamage, fastener.curve),
@@ -235,6 +236,8 @@ function makeRunResult(recipe: RunRecipe, zones: readonly Zone[], axis: RecordAx
     }),
   };
 }
+
+const END = { outward: { value: 3.2, when: '' }, inward: { value: 2.1, when: '' } };
 
 function strainOf(run: Run): Float64Array {
   const { temperature } = run.zone;
