@@ -3,6 +3,8 @@ export interface Place {
   readonly file: string;
   readonly line?: number;
   readonly column?: number;
+  /** Of a CSV, the cell as a spreadsheet names it, such as `C3`. */
+  readonly cell?: string;
   /** The CSV column's header or the key's path in the job, such as `limits.damage`. */
   readonly key?: string;
 }
@@ -33,8 +35,9 @@ export class InputError extends Error {
 
 /** The issue as one message of one to three lines: place, found and expected, and how to mend it. */
 export function wordIssue(issue: Issue): string {
-  const { file, line, column, key } = issue.place;
-  const where = [file, line, column].filter((part) => part !== undefined).join(':');
+  const { file, line, column, cell, key } = issue.place;
+  const position = [file, line, column].filter((part) => part !== undefined).join(':');
+  const where = cell === undefined ? position : `${position} (cell ${cell})`;
   const subject = key === undefined ? '' : `${key}: `;
   const found = issue.found === undefined ? 'nothing stands here' : `found ${quote(issue.found)}`;
   const nearest = issue.nearest === undefined ? '' : ` Did you mean ${quote(issue.nearest)}?`;
@@ -42,8 +45,23 @@ export function wordIssue(issue: Issue): string {
   return `${where}  ${subject}${found}, expected ${issue.expected}.${nearest}${hint}`;
 }
 
-/** The user's own text in quotes, shortened where it is very long. */
+/** How many issues are told in full unless all are asked for. */
+export const TOLD_IN_FULL = 10;
+
+/**
+ * The messages of several issues: the first ten in full and how many more there are, or all.
+ *
+ * @param all whether to word every one
+ */
+export function wordIssues(issues: readonly Issue[], all: boolean): string[] {
+  const told = all ? issues : issues.slice(0, TOLD_IN_FULL);
+  const rest = issues.length - told.length;
+  const more = `… and ${rest} more ${rest === 1 ? 'error' : 'errors'}: --all-errors shows all.`;
+  return [...told.map(wordIssue), ...(rest === 0 ? [] : [more])];
+}
+
+/** The user's own text in quotes on one line, shortened where it is very long. */
 function quote(text: string): string {
   const shown = text.length > 80 ? `${text.slice(0, 77)}…` : text;
-  return `"${shown}"`;
+  return `"${shown.replace(/\p{Cc}+/gu, ' ')}"`;
 }

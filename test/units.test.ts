@@ -1,11 +1,11 @@
 import { describe, expect, it } from 'vitest';
 import {
+  isUnit,
   type Quantity,
   quantityOf,
   readNumber,
   readQuantity,
-  toUnits,
-  unitName,
+  resultUnit,
 } from '../src/units.ts';
 
 /**
@@ -40,6 +40,18 @@ const READ: readonly [string, Quantity, number][] = [
   ['210 GPa', 'stress', 210000],
   ['80 N/mm²', 'stress', 80],
   ['80 N/mm2', 'stress', 80],
+  ['1/4"', 'length', 6.35],
+  [`2'-6"`, 'length', 762],
+  ['2 ft 6 1/2 in', 'length', 774.7],
+  [`2'`, 'length', 609.6],
+  ['40 µm', 'length', 0.04],
+  ['40 μm', 'length', 0.04],
+  ['20 N m', 'torque', 20000],
+  ['20 Nm', 'torque', 20000],
+  ['20 N·m', 'torque', 20000],
+  ['1 kNm', 'torque', 1e6],
+  ['15 ft-lb', 'torque', 15 * LBF * 304.8],
+  ['15 lbf-ft', 'torque', 15 * LBF * 304.8],
   ['1 kip/in', 'stiffness', (1000 * LBF) / 25.4],
   ['2 kN/mm', 'stiffness', 2000],
   ['23e-6 / K', 'expansion', 23e-6],
@@ -124,13 +136,33 @@ describe('quantities with units', () => {
   });
 
   it('writes in the units of the results', () => {
-    expect(toUnits(1000 * LBF, 'force', 'US')).toBeCloseTo(1, 14);
-    expect(toUnits(1500, 'force', 'SI')).toBe(1.5);
-    expect(toUnits(609.6, 'length', 'US')).toBeCloseTo(24, 13);
-    expect(toUnits(100, 'temperature', 'US')).toBe(212);
-    expect(toUnits(-40, 'temperature', 'US')).toBe(-40);
+    const to = (value: number, quantity: Quantity, system: 'SI' | 'US') =>
+      resultUnit(quantity, system).from(value);
+    expect(to(1000 * LBF, 'force', 'US')).toBeCloseTo(1, 14);
+    expect(to(1500, 'force', 'SI')).toBe(1.5);
+    expect(to(609.6, 'length', 'US')).toBeCloseTo(24, 13);
+    expect(to(100, 'temperature', 'US')).toBe(212);
+    expect(to(-40, 'temperature', 'US')).toBe(-40);
     expect(
-      (['force', 'length', 'stress', 'temperature'] as const).map((q) => unitName(q, 'US')),
+      (['force', 'length', 'stress', 'temperature'] as const).map((q) => resultUnit(q, 'US').name),
     ).toEqual(['kip', 'in', 'ksi', '°F']);
+  });
+
+  it.each([
+    ['1,250 mm', '1250 or 1.250'],
+    ['4,50 mm', '4.50'],
+    ['1.250,5 mm', '1250.5'],
+    ['1 250 mm', '1250'],
+    ['16-Sep', 'a fraction for a date'],
+    ['#REF!', 'formula'],
+  ])('says what %j may mean', (text, words) => {
+    const read = readQuantity(text, 'length', 'mm');
+    expect(read.value).toBeNull();
+    expect(read.hint).toContain(words);
+  });
+
+  it('tells a unit from a value', () => {
+    expect(['mm', 'kN/mm', '1e-6/K', '1/K', '°C', 'mm²'].map(isUnit)).not.toContain(false);
+    expect(['600 mm', 'R1', '', '12', 'rigid', 'kg mm s'].map(isUnit)).not.toContain(true);
   });
 });

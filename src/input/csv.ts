@@ -1,101 +1,118 @@
 import { parse } from 'csv-parse/sync';
 import type { Place } from '../issue.ts';
+import { cellName } from './cell-name.ts';
 import { reportCsvFault } from './csv-fault.ts';
 import { type Findings, report } from './findings.ts';
-import { readHeader } from './header.ts';
 import type { SourceEntry, SourceMap } from './source.ts';
+import { type Cell, type Column, tableColumns, withUnitsRow } from './table-columns.ts';
+
+/** Longer than anything that a cell may hold; a mark that a quote is missing or the file is something else. */
+export const LONGEST_TEXT = 2000;
 
 /**
- * Reads a small CSV table (RFC 4180: commas, double quotes, a header row) into rows whose cells know
- * their line and column. Blank lines are passed over.
+ * Reads a small CSV table as spreadsheets write it (RFC 4180; cells between commas, semicolons or tabs; a header
+ * row, and if need be a row of units below it) into rows whose cells know their places. Blank lines, rows and
+ * columns are passed over.
  *
  * @param text the file's text
  * @param file its name, for the places
  * @returns the rows, none where the text is no table; every fault is reported
  */
 export function readCsv(text: string, file: string, findings: Findings): SourceMap[] {
-  const [header, ...rows] = readCells(text.replace(/\r\n?/g, '\n'), file, findings);
+  const [header, ...body] = readCells(text.replace(/\r\n?/g, '\n'), file, findings);
   if (header === undefined) return [];
-  const columns = readColumns(header, findings);
+  const plain = tableColumns(header, findings);
+  const { columns, rows } = withUnitsRow(plain, body);
   return rows.map((row) => toMap(row, columns, findings));
 }
 
-interface Cell {
-  readonly text: string;
-  readonly place: Place;
-}
-
-interface Column {
-  readonly name: string;
-  readonly unit?: string;
-  readonly header: Cell;
-}
-
-/** The table's cells, row by row; none where it has a fault. */
+/** The table's cells, row by row, those that are not all blank; none where it has a fault. */
 function readCells(text: string, file: string, findings: Findings): Cell[][] {
-  const placeAt = placeFinder(text, file);
+  const { delimiter, body } = delimiterOf(text);
+  const placeAt = placeFinder(body, file);
   let end = -1;
-  const cast = (cell: string, { bytes, column }: { bytes: number; column: number | string }) => {
+  const cast = (cell: string, { bytes, index }: { bytes: number; index: number }): Cell => {
     // The parser stands at the end of the cell: the next one begins behind the separator.
-    const place = placeAt(end + 1, column === 0);
+    const place = placeAt(end + 1, index);
     end = bytes;
-    return { text: cell, place };
+    return { text: sound(cell.trim(), place, findings), place };
   };
   let rows: Cell[][];
   try {
-    const options = { trim: true, relax_column_count: true, skip_empty_lines: true, cast };
-    rows = parse(text, options) as unknown as Cell[][];
+    const how = {
+      trim: true,
+      relax_column_count: true,
+      relax_quotes: true,
+      skip_empty_lines: true,
+    };
+    rows = parse(body, { ...how, delimiter, cast }) as unknown as Cell[][];
   } catch (error) {
     reportCsvFault(error, file, findings);
     return [];
   }
-  if (rows.length === 0) report(findings, { file, line: 1 }, { expected: 'a header row' });
-  return rows.filter((row) => row.some((cell) => cell.text !== ''));
+  const filled = rows.filter((row) => row.some((cell) => cell.text !== ''));
+  if (filled.length === 0) report(findings, { file, line: 1 }, { expected: 'a header row' });
+  return filled;
+}
+
+/** What stands between the cells: what a first line `sep=;` says, else the commonest in the header. */
+function delimiterOf(text: string): { delimiter: string; body: string } {
+  const said = /^sep=(.)(?=\n|$)/i.exec(text);
+  if (said !== null) return { delimiter: said[1], body: text.slice(said[0].length) };
+  const header = (/^.*\S.*$/m.exec(text)?.[0] ?? '').slice(0, LONGEST_TEXT);
+  const count = (mark: string) => header.replace(/"[^"]*"/g, '').split(mark).length;
+  const [best] = [',', ';', '\t'].sort((a, b) => count(b) - count(a));
+  return { delimiter: best, body: text };
+}
+
+/** The cell's text; blank where it is far too long, which is reported. */
+function sound(text: string, place: Place, findings: Findings): string {
+  if (text.length <= LONGEST_TEXT) return text;
+  report(findings, place, {
+    found: `${text.slice(0, 20)}…, ${text.length} characters`,
+    expected: `a cell of at most ${LONGEST_TEXT} characters`,
+    hint: 'A double quote may be missing at its end.',
+  });
+  return '';
 }
 
 /**
  * Turns rising byte offsets into places. A cell begins at its first character that is no space; the first
- * of a row also behind any blank lines.
+ * of a row also behind any blank lines. A line end inside quotes begins no row of a spreadsheet.
  */
-function placeFinder(text: string, file: string): (offset: number, first: boolean) => Place {
+function placeFinder(text: string, file: string): (offset: number, index: number) => Place {
   const bytes = Buffer.from(text);
   let line = 1;
+  let inner = 0;
   let lineStart = 0;
   let at = 0;
-  return (offset, first) => {
+  return (offset, index) => {
     let start = offset;
-    while (bytes[start] === SPACE || (first && bytes[start] === NEWLINE)) start++;
+    while (bytes[start] === SPACE || (index === 0 && bytes[start] === NEWLINE)) start++;
     for (; at < start; at++) {
       if (bytes[at] !== NEWLINE) continue;
       line++;
+      if (at < offset - 1) inner++;
       lineStart = at + 1;
     }
-    return { file, line, column: bytes.toString('utf8', lineStart, start).length + 1 };
+    const column = bytes.toString('utf8', lineStart, start).length + 1;
+    return { file, line, column, cell: cellName(index, line - inner) };
   };
 }
 
 const NEWLINE = 10;
 const SPACE = 32;
 
-function readColumns(header: readonly Cell[], findings: Findings): Column[] {
-  const names = new Set<string>();
-  return header.map((cell) => {
-    const { name, unit } = readHeader(cell.text);
-    if (name === '') report(findings, cell.place, { found: cell.text, expected: 'a column name' });
-    else if (names.has(name)) {
-      report(findings, cell.place, { found: cell.text, expected: 'each column once' });
-    }
-    names.add(name);
-    return unit === undefined ? { name, header: cell } : { name, unit, header: cell };
-  });
-}
-
-function toMap(row: readonly Cell[], columns: readonly Column[], findings: Findings): SourceMap {
+function toMap(
+  row: readonly Cell[],
+  columns: readonly (Column | null)[],
+  findings: Findings,
+): SourceMap {
   const entries = new Map<string, SourceEntry>();
   for (const [i, { text, place }] of row.entries()) {
     const column = columns[i];
-    if (column === undefined) {
-      if (text !== '') reportExtra(text, place, columns.length, findings);
+    if (column === undefined || column === null) {
+      if (text !== '') reportStray(text, place, columns, findings);
       continue;
     }
     const header = {
@@ -114,10 +131,17 @@ function toMap(row: readonly Cell[], columns: readonly Column[], findings: Findi
   return { type: 'map', entries, place: { file, ...(line === undefined ? {} : { line }) } };
 }
 
-function reportExtra(found: string, place: Place, count: number, findings: Findings): void {
+/** A text in no column, or in one without a name. */
+function reportStray(
+  found: string,
+  place: Place,
+  columns: readonly (Column | null)[],
+  findings: Findings,
+): void {
+  const named = columns.filter((column) => column !== null).length;
   report(findings, place, {
     found,
-    expected: `no more than the ${count} cells of the header`,
-    hint: 'Put a text that holds a comma in double quotes.',
+    expected: `nothing here: the header names ${named} ${named === 1 ? 'column' : 'columns'}, and none stands over it`,
+    hint: 'Name the column, clear the cell, or put a text that holds a comma in double quotes.',
   });
 }

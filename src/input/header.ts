@@ -4,9 +4,9 @@ export interface Header {
   readonly unit?: string;
 }
 
-/** Reads a header such as `spacing [mm]` or `fixed`. */
+/** Reads a header such as `spacing [mm]`, `spacing (mm)` or `fixed`. */
 export function readHeader(text: string): Header {
-  const match = /^(.*?)\s*\[([^\]]*)\]$/.exec(text.trim());
+  const match = /^(.*?)\s*(?:\[([^\]]*)\]|\(([^)]*)\))$/.exec(text.trim());
   if (match === null) return { name: text.trim() };
-  return { name: match[1], unit: match[2].trim() };
+  return { name: match[1], unit: (match[2] ?? match[3]).trim() };
 }

@@ -1,17 +1,17 @@
 import type { CheckUnit } from '../model.ts';
-import { type Quantity, toUnits, type UnitSystem, unitName } from '../units.ts';
+import { type Quantity, resultUnit, type UnitSystem } from '../units.ts';
 
 /** What a written number measures; a ratio has no unit. */
 export type Written = Quantity | 'ratio';
 
 /** The unit's name in the results, blank for a ratio. */
 export function unitOf(quantity: Written, units: UnitSystem): string {
-  return quantity === 'ratio' ? '' : unitName(quantity, units);
+  return quantity === 'ratio' ? '' : resultUnit(quantity, units).name;
 }
 
 /** The value, given in base units, in the units of the results. */
 export function inUnits(value: number, quantity: Written, units: UnitSystem): number {
-  return quantity === 'ratio' ? value : toUnits(value, quantity, units);
+  return quantity === 'ratio' ? value : resultUnit(quantity, units).from(value);
 }
 
 /** The quantity that a check's demand and limit are. */

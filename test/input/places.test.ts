@@ -39,6 +39,7 @@ describe('places in CSV', () => {
       file: 'm.csv',
       line: 7,
       column: 4,
+      cell: 'B6',
       key: 'area [mm²]',
     });
   });
@@ -65,8 +66,9 @@ describe('places in CSV', () => {
     };
     expect(fault('id,area,id\na,1,b')).toEqual(['1:9 id']);
     expect(fault('id,area\na,1,b')).toEqual(['2:5 b']);
-    expect(fault('id,,area\na,1,b')).toEqual(['1:4 ']);
-    expect(fault('id,area\na,1"2')).toEqual(['2:undefined a double quote out of place']);
+    expect(fault('id,,area\na,1,b')).toEqual(['2:3 1']);
+    expect(fault('id,area\na,"12')).toEqual(['2:undefined a double quote out of place']);
+    expect(fault('id,area\na,"1"2')).toEqual(['2:undefined a double quote out of place']);
     expect(fault('')).toEqual(['1:undefined undefined']);
   });
 });
