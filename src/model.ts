@@ -39,7 +39,7 @@ export interface WeatherFile {
 
 /** What the sun's light on a member was reckoned from: channels by name. */
 export type LightBasis =
-  | { readonly from: 'surface'; readonly channel: string }
+  | { readonly from: 'surface'; readonly channel: string; readonly stamp: Stamp }
   | {
       readonly from: 'sky';
       readonly global: string | null;
@@ -348,6 +348,17 @@ export interface DefaultUsed {
   readonly value: string;
 }
 
+/** A value that was worked out from others that the user gave. */
+export interface DerivedValue {
+  /** As in a default. */
+  readonly key: string;
+  /** In base units. */
+  readonly value: number;
+  readonly quantity: Quantity;
+  /** How, such as `the area less 1 hole`. */
+  readonly how: string;
+}
+
 export interface Job {
   readonly title: string;
   readonly units: 'SI' | 'US';
@@ -365,6 +376,7 @@ export interface Job {
   readonly runs: readonly Run[];
   readonly inputs: readonly InputFile[];
   readonly defaults: readonly DefaultUsed[];
+  readonly derived: readonly DerivedValue[];
   readonly warnings: readonly string[];
 }
 

@@ -1,16 +1,17 @@
 import type { Zone } from '../model.ts';
 import { constantZone, zoneOf } from '../temperature/zone.ts';
+import { channelNamed } from './channel.ts';
 import { type Findings, report } from './findings.ts';
 import { ZONE_KEYS } from './keys.ts';
 import type { Library } from './library.ts';
-import { nearestName } from './nearest-name.ts';
 import { readKeys } from './read-keys.ts';
-import type { RecordTable } from './record.ts';
 import type { RecordBasis } from './record-basis.ts';
-import { placeOf, type SourceMap } from './source.ts';
+import type { SourceMap } from './source.ts';
+import { SUNLIT_ZONE_KEYS } from './sun-keys.ts';
+import { readSunlitZone } from './sunlit-zone.ts';
 
 /**
- * The job's zones, each from a channel of the record or constant.
+ * The job's zones, each from a channel of the record, constant, or from sun and air.
  *
  * @param map the job's `zones`
  * @param basis `null` where the record itself has faults: then no zone is built
@@ -27,7 +28,7 @@ export function readZones(
     }
     if (value.type !== 'map') {
       report(findings, value.place, {
-        expected: 'a column or a constant, such as { column: deck } or { constant: 21 degC }',
+        expected: 'a column, a constant or air, such as { column: deck } or { constant: 21 degC }',
       });
       continue;
     }
@@ -45,34 +46,26 @@ function readZone(
 ): Zone | null {
   const { complete, values } = readKeys(ZONE_KEYS, map, `zones.${name}.`, findings);
   if (!complete) return null;
-  if ((values.column === null) === (values.constant === null)) {
+  const ways = (['column', 'constant', 'air'] as const).filter((key) => values[key] !== null);
+  if (ways.length !== 1) {
     return report(findings, map.place, {
-      found: values.column === null ? 'neither' : 'both',
-      expected: 'either column or constant',
+      found: ways.length === 0 ? 'none' : ways.join(' and '),
+      expected: 'one of column, constant and air',
     });
   }
+  if (ways[0] === 'air') return readSunlitZone(name, values, map, basis, findings);
+  refuseSunlit(ways[0], map, findings);
   if (basis === null) return null;
   if (values.constant !== null) return constantZone(name, values.constant, basis.axis);
-  const column = values.column ?? '';
-  const channel = basis.record.channels.get(column);
-  if (channel === undefined) return reportNoChannel(column, map, basis.record, findings);
-  if (channel.some((value) => !Number.isNaN(value))) {
-    return zoneOf(name, channel, basis.axis, basis.fillUpTo);
-  }
-  const expected = 'a channel that holds at least one value';
-  return report(findings, placeOf(map, 'column'), { found: column, expected });
+  const column = channelNamed('column', map, basis.record, 'temperature', findings);
+  const channel = column === null ? undefined : basis.record.channels.get(column);
+  return channel === undefined ? null : zoneOf(name, channel, basis.axis, basis.fillUpTo);
 }
 
-function reportNoChannel(
-  column: string,
-  map: SourceMap,
-  { channels }: RecordTable,
-  findings: Findings,
-): null {
-  const nearest = nearestName(column, channels.keys());
-  return report(findings, placeOf(map, 'column'), {
-    found: column,
-    expected: `a channel of the record: ${[...channels.keys()].join(', ')}`,
-    ...(nearest === undefined ? {} : { nearest }),
-  });
+/** The keys of a zone in the sun mean nothing for one whose temperature is given. */
+function refuseSunlit(way: string, map: SourceMap, findings: Findings): void {
+  for (const [key, { place }] of map.entries) {
+    if (!Object.hasOwn(SUNLIT_ZONE_KEYS, key)) continue;
+    report(findings, place, { found: key, expected: `no key of a zone in the sun beside ${way}` });
+  }
 }
