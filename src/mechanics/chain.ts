@@ -104,7 +104,7 @@ function firstToReach(chain: Chain, remaining: number): number {
     const move = rate[i] * way;
     const limit = move > 0 ? upper[i] : lower[i];
     const room = limit - movement[i];
-    if (move > 0 ? move > room : move < room) {
+    if (move > 0 ? move > room : move < 0 && move < room) {
       first = i;
       // a slipping joint that turned round, or one at its limit already: at once
       if (move > 0 ? room <= 0 : room >= 0) return i;

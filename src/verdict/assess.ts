@@ -2,15 +2,13 @@ import type { DamageTables } from '../damage/damage-table.ts';
 import { rangeBins } from '../damage/range-bins.ts';
 import type { Chain } from '../mechanics/chain.ts';
 import { followRecord, type History } from '../mechanics/history.ts';
-import { strainPath } from '../mechanics/strain-path.ts';
 import { traceConnection } from '../mechanics/trace.ts';
 import type { Job, Run, RunResult, Trace } from '../model.ts';
-import { coveredHours, yearsOf } from '../temperature/gaps.ts';
 import { assessConnection, fastenerSpectrum, fastenerUse } from './connection.ts';
 import { governingConnection } from './governing-connection.ts';
-import { momentText } from './moment-text.ts';
 import { createPassCounters } from './pass-counters.ts';
-import { runChain, runExtremes, runStrain } from './run-chain.ts';
+import { runChain } from './run-chain.ts';
+import { type RunRecord, runRecord } from './run-record.ts';
 import type { RunScene } from './run-scene.ts';
 import { assessSpan, memberUse, type SpanLoad, spanSpectrum, worseSpan } from './span-load.ts';
 
@@ -18,7 +16,8 @@ import { assessSpan, memberUse, type SpanLoad, spanSpectrum, worseSpan } from '.
 const NOISE = 1e-9;
 
 /** A run's demands, checks and verdicts, without the bins and the trace that only tables and charts show. */
-export interface RunAssessment extends Omit<RunResult, 'fastenerBins' | 'memberBins' | 'trace'> {
+export interface RunAssessment
+  extends Omit<RunResult, 'fastenerBins' | 'memberBins' | 'trace' | 'remedy'> {
   /** All that the record does to the run. */
   readonly history: History;
 }
@@ -39,6 +38,7 @@ export function assessRun(run: Run, job: Job, tables: DamageTables): RunResult {
   return {
     ...facts,
     ...binsOf(scene, spans, governing),
+    remedy: null,
     trace: () => {
       trace ??= traceOf(chain, strain, scene, spans, governing);
       return trace;
@@ -53,9 +53,15 @@ export function assessRun(run: Run, job: Job, tables: DamageTables): RunResult {
  * @param run the run
  * @param job limits, counting settings, extremes and the record's axis
  * @param tables damage tables shared by all runs of the job
+ * @param record what the record is to the run, where it is known already
  */
-export function assessConnections(run: Run, job: Job, tables: DamageTables): RunAssessment {
-  return followRun(run, job, tables).assessment;
+export function assessConnections(
+  run: Run,
+  job: Job,
+  tables: DamageTables,
+  record?: RunRecord,
+): RunAssessment {
+  return followRun(run, job, tables, record).assessment;
 }
 
 /** An assessment and what it was made from. */
@@ -67,33 +73,25 @@ interface FollowedRun {
   readonly strain: Float64Array;
 }
 
-function followRun(run: Run, job: Job, tables: DamageTables): FollowedRun {
+function followRun(
+  run: Run,
+  job: Job,
+  tables: DamageTables,
+  record = runRecord(run, job),
+): FollowedRun {
   const chain = runChain(run);
-  const strain = runStrain(run);
-  const path = strainPath(strain);
-  const extremes = runExtremes(run, job.extremes);
   const counters = createPassCounters(chain.count, run.member.curve?.compressionShare ?? 1);
   const options = {
-    extremes: extremes.map((extreme) => extreme.strain),
+    extremes: record.extremes.map((extreme) => extreme.strain),
     residue: job.counting.residue,
   };
-  const history = followRecord(chain, path, options, counters);
-  const zones = run.structure === null ? [run.zone] : [run.zone, run.structure.zone];
-  const hours = coveredHours(job.axis, zones);
-  const strains = [...options.extremes, ...Array.from(path.turns, (turn) => strain[turn])];
-  const scene: RunScene = {
-    run,
-    job,
-    tables,
-    history,
-    counters,
-    years: yearsOf(hours, job.represents),
-    noise: NOISE * chain.axialStiffness * strains.reduce((m, e) => Math.max(m, Math.abs(e)), 0),
-    when: (mark) => momentText(path, mark, job.axis.times, extremes),
-  };
+  const history = followRecord(chain, record.path, options, counters);
+  const noise = NOISE * chain.axialStiffness * record.largestStrain;
+  const { years, when } = record;
+  const scene: RunScene = { run, job, tables, history, counters, years, noise, when };
   const spans = counters.spans.map((_, j) => assessSpan(scene, j));
-  const assessment = assessmentOf(scene, spans, hours);
-  return { assessment, scene, spans, chain, strain };
+  const assessment = assessmentOf(scene, spans, record.coveredHours);
+  return { assessment, scene, spans, chain, strain: record.strain };
 }
 
 function assessmentOf(

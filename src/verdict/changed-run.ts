@@ -1,4 +1,4 @@
-import type { Fastener, Overhangs, Role, Run } from '../model.ts';
+import type { Fastener, Joint, Overhangs, Role, Run } from '../model.ts';
 
 /**
  * The run with other roles: its fixed type where fixed, `slotted` elsewhere.
@@ -38,6 +38,8 @@ export function withSpacing(
   return withRoles({ ...run, positions }, rolesAt(positions), run.slottedType);
 }
 
+const NEW_JOINT: Joint = { cover: { kind: 'open' }, structureMovement: 0 };
+
 /**
  * The run cut into pieces between fasteners, at the middle of a span each. The member's ends at a cut overhang their
  * last fastener by half that span, less half the gap.
@@ -60,6 +62,7 @@ export function cutRun(run: Run, firsts: readonly number[], gap: number): Run[] 
       overhangs: overhangsOf(run, start, end, gap),
       line: run.line ?? run.id,
       gap: last ? run.gap : gap,
+      joint: last ? run.joint : NEW_JOINT,
     };
   });
 }

@@ -1,17 +1,26 @@
 import { createDamageTables } from '../damage/damage-table.ts';
-import type { Job, Result } from '../model.ts';
+import type { Job, Result, RunResult } from '../model.ts';
 import { assessRun } from './assess.ts';
+import { searchFor, utilisationOf } from './candidate.ts';
 import { firstLargest } from './first-largest.ts';
 import { withJointGaps } from './joint-gaps.ts';
+import { remedyOf } from './remedy.ts';
+import { withVerdicts } from './with-verdicts.ts';
 
 /**
- * Screens every run of a job: mechanics, counting, damage, checks and verdicts. The library's main call.
+ * Screens every run of a job: mechanics, counting, damage, checks, and a remedy for each run that fails. The library's
+ * main call.
  *
  * @param job a job in base units, as `readJob` gives it or put together by hand
+ * @param options.remedies whether to look for remedies (default true); without them a verdict is `ok` or `fails`
  */
-export function screen(job: Job): Result {
+export function screen(job: Job, options: { readonly remedies?: boolean } = {}): Result {
   const tables = createDamageTables();
-  const runs = withJointGaps(job.runs.map((run) => assessRun(run, job, tables)));
-  const uses = runs.map((run) => run.connections[run.governing].governing?.utilisation ?? 0);
-  return { job, runs, governing: firstLargest(uses) };
+  const assessed = withJointGaps(job.runs.map((run) => assessRun(run, job, tables)));
+  const remedied = (run: RunResult): RunResult =>
+    run.connections.every(({ verdict }) => verdict === 'ok')
+      ? run
+      : withVerdicts({ ...run, remedy: remedyOf(run, searchFor(run.run, job, tables)) });
+  const runs = options.remedies === false ? assessed : assessed.map(remedied);
+  return { job, runs, governing: firstLargest(runs.map(utilisationOf)) };
 }

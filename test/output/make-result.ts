@@ -56,6 +56,8 @@ export function makeResult(recipe: ResultRecipe = {}): Result {
     axis,
     zones,
     represents: null,
+    weather: null,
+    warming: null,
     extremes: [],
     limits: {
       designLife: 50,
@@ -65,7 +67,7 @@ export function makeResult(recipe: ResultRecipe = {}): Result {
       fastenerFactor: 1.35,
       staticFactor: 1.5,
     },
-    counting: { residue: 'repeat', forceGate: 0, stressGate: 0 },
+    counting: { residue: 'repeat', forceGate: 0, stressGate: 0, extremesCycle: false },
     remedies: {
       longestTravel: 20,
       slotTravels: null,
@@ -81,6 +83,7 @@ export function makeResult(recipe: ResultRecipe = {}): Result {
     curves: [FASTENER_CURVE, MEMBER_CURVE],
     runs: results.map((r) => r.run),
     inputs: [{ name: 'job.yaml', sha256: 'a'.repeat(64) }],
+    derived: [],
     defaults: [
       { key: 'limits.damage', value: '1' },
       { key: 'record.gaps.fill_up_to', value: '3 h' },
@@ -229,6 +232,7 @@ function makeRunResult(recipe: RunRecipe, zones: readonly Zone[], axis: RecordAx
     largestSpanForce: 30000,
     fastenerBins: makeBins(worst.shearRange, worst.fastenerDamage, fastener.curve),
     memberBins: makeBins(worst.stressRange, worst.memberDamage, run.member.curve),
+    remedy: null,
     trace: () => ({
       shear: strain.map((e) => e * shear[governing]),
       spanForce: strain.map((e) => -e * shear[governing] * 1.7),
