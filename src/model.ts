@@ -3,6 +3,7 @@
  * K for temperature differences, °C for temperatures, ms since 1970 for times on the record's own clock.
  * An optional quantity that the user did not give is `null`, never `NaN`.
  */
+import type { Quantity } from './units.ts';
 
 /** One sample's standing in one temperature history. */
 export const VALID = 0;
@@ -307,6 +308,8 @@ export interface CountingSettings {
   readonly forceGate: number;
   /** Stress ranges of a member under this are dropped [MPa]; 0 is none. */
   readonly stressGate: number;
+  /** Whether one cycle a year between the hottest and the coldest extreme is added to the damage. */
+  readonly extremesCycle: boolean;
 }
 
 /** What remedies may propose, and how their slots and gaps are rounded up. */
@@ -332,6 +335,14 @@ export interface Extreme {
   readonly name: string;
   /** Temperature of each zone that it names [°C]. */
   readonly temperatures: ReadonlyMap<string, number>;
+}
+
+/** A what-if: warmer zones. Constant zones, lock-in temperatures and extremes stay as they are. */
+export interface Warming {
+  /** Added to every temperature [K]. */
+  readonly add: number;
+  /** Multiplies the swing about the mean of the 24 h around each sample. */
+  readonly dailySwing: number;
 }
 
 export interface InputFile {
@@ -366,6 +377,9 @@ export interface Job {
   readonly zones: readonly Zone[];
   /** Years that the record stands for, where the job says so. */
   readonly represents: number | null;
+  /** The weather file that the record was read from; `null` for a CSV. */
+  readonly weather: WeatherFile | null;
+  readonly warming: Warming | null;
   readonly extremes: readonly Extreme[];
   readonly limits: Limits;
   readonly counting: CountingSettings;
@@ -415,6 +429,8 @@ export interface Spectrum {
   readonly ranges: Float64Array;
   /** Ranges of half cycles, in no order; empty under residue `repeat`. */
   readonly halfRanges: Float64Array;
+  /** Ranges that the record does not hold and that are added to it, each so many times. */
+  readonly added?: { readonly ranges: Float64Array; readonly count: number };
 }
 
 /** Damage and cycles of one series against one curve. */
@@ -526,9 +542,37 @@ export interface RunResult {
   readonly memberBins: readonly RangeBin[];
   /** Reckoned when first asked for: the record is passed through once more. */
   readonly trace: () => Trace;
+  /** The extremes between which a cycle a year was added to the damage; `null` where none was. */
+  readonly extremesCycle: { readonly hot: string; readonly cold: string } | null;
+  /**
+   * Damage of each year of the record as if it stood alone, reckoned when first asked for: the record is passed through
+   * once more. Empty for a record of one year or less.
+   */
+  readonly yearByYear: () => readonly YearDamage[];
   /** `null` where the run passes, or where no remedy was looked for. */
   readonly remedy: Remedy | Rework | null;
 }
+
+/** One year of a longer record, from an anniversary of its first sample to the next, as if it stood alone. */
+export interface YearDamage {
+  /** Times of its first and last sample [ms since 1970 on the record's own clock]. */
+  readonly from: number;
+  readonly to: number;
+  readonly coveredHours: number;
+  /** Years that it stands for: 1, or the covered share of a year that is not whole. */
+  readonly years: number;
+  /** Miner sums a year at each connection; `null` without a curve. */
+  readonly connections: readonly Pick<
+    Connection,
+    'memberDamagePerYear' | 'fastenerDamagePerYear' | 'life'
+  >[];
+}
+
+/** What a run comes to in warmer zones. */
+export type WarmedRun = Pick<
+  RunResult,
+  'run' | 'connections' | 'governing' | 'passes' | 'walks' | 'years'
+>;
 
 /** A changed run that was screened again and passes every check that was given. */
 export interface Remedy {
@@ -574,6 +618,8 @@ export interface SingleChange {
 export interface Result {
   readonly job: Job;
   readonly runs: readonly RunResult[];
+  /** The same runs in warmer zones; `null` where the job asks for none. */
+  readonly warmed: readonly WarmedRun[] | null;
   /** Index into `runs` of the one whose governing utilisation is largest. */
   readonly governing: number;
 }

@@ -14,12 +14,22 @@ export interface GatedSpectrum {
  */
 export function gateSpectrum(spectrum: Spectrum, gate: number): GatedSpectrum {
   if (!(gate > 0)) return { kept: spectrum, dropped: EMPTY };
-  const { ranges, halfRanges } = spectrum;
   const keeps = (range: number) => range >= gate;
-  const drops = (range: number) => range < gate;
   return {
-    kept: { ranges: ranges.filter(keeps), halfRanges: halfRanges.filter(keeps) },
-    dropped: { ranges: ranges.filter(drops), halfRanges: halfRanges.filter(drops) },
+    kept: filterSpectrum(spectrum, keeps),
+    dropped: filterSpectrum(spectrum, (range) => !keeps(range)),
+  };
+}
+
+/** The ranges of a spectrum that pass a test. */
+export function filterSpectrum(
+  { ranges, halfRanges, added }: Spectrum,
+  test: (range: number) => boolean,
+): Spectrum {
+  return {
+    ranges: ranges.filter(test),
+    halfRanges: halfRanges.filter(test),
+    ...(added === undefined ? {} : { added: { ...added, ranges: added.ranges.filter(test) } }),
   };
 }
 

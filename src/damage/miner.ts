@@ -54,7 +54,9 @@ export function actingTable(spectrum: Spectrum, use: SeriesUse): DamageTable | n
   if (table === null || table.curve.below !== 'threshold') return table;
   const factor = table.factor * use.scale;
   const reaches = (range: number) => factor * range >= table.curve.limitRange;
-  return spectrum.ranges.some(reaches) || spectrum.halfRanges.some(reaches) ? table : null;
+  const { ranges, halfRanges, added } = spectrum;
+  const acts = ranges.some(reaches) || halfRanges.some(reaches) || added?.ranges.some(reaches);
+  return acts ? table : null;
 }
 
 /** The gate on unfactored ranges [series' unit]. */
@@ -62,9 +64,10 @@ export function unfactoredGate({ table, gate }: SeriesUse): number {
   return table === null ? gate : gate / table.factor;
 }
 
-/** Whole cycles, and half cycles as 0.5. */
-function cyclesOf({ ranges, halfRanges }: Spectrum): number {
-  return ranges.length + 0.5 * halfRanges.length;
+/** Whole cycles, half cycles as 0.5, and those that were added. */
+export function cyclesOf({ ranges, halfRanges, added }: Spectrum): number {
+  const more = added === undefined ? 0 : added.count * added.ranges.length;
+  return ranges.length + 0.5 * halfRanges.length + more;
 }
 
 /**
@@ -76,11 +79,16 @@ function cyclesOf({ ranges, halfRanges }: Spectrum): number {
  */
 export function damageOf(spectrum: Spectrum, table: DamageTable | null, use: SeriesUse): DamageSum {
   if (table === null) return { sum: 0, damaging: 0 };
-  const whole = sumDamage(table.cells, spectrum.ranges, table.factor * use.scale);
-  const half = sumDamage(table.cells, spectrum.halfRanges, table.factor * use.scale);
+  const sumOf = (ranges: Float64Array) => sumDamage(table.cells, ranges, table.factor * use.scale);
+  const { ranges, halfRanges, added } = spectrum;
+  const parts = [
+    { count: 1, ...sumOf(ranges) },
+    { count: 0.5, ...sumOf(halfRanges) },
+    ...(added === undefined ? [] : [{ count: added.count, ...sumOf(added.ranges) }]),
+  ];
   return {
-    sum: whole.sum + 0.5 * half.sum,
-    damaging: whole.damaging + 0.5 * half.damaging,
+    sum: parts.reduce((total, { count, sum }) => total + count * sum, 0),
+    damaging: parts.reduce((total, { count, damaging }) => total + count * damaging, 0),
   };
 }
 

@@ -1,8 +1,8 @@
-import { gateSpectrum } from '../counting/gate.ts';
+import { filterSpectrum, gateSpectrum } from '../counting/gate.ts';
 import type { RangeBin, Spectrum } from '../model.ts';
 import { cyclesToFailure } from './cycles-to-failure.ts';
 import type { DamageTable } from './damage-table.ts';
-import { actingTable, damageOf, type SeriesUse, unfactoredGate } from './miner.ts';
+import { actingTable, cyclesOf, damageOf, type SeriesUse, unfactoredGate } from './miner.ts';
 
 /** Most bins in a table; round widths make it this many or down to half as many. */
 const MOST_BINS = 24;
@@ -22,19 +22,19 @@ const ROUND = [1, 2, 2.5, 5, 10];
  */
 export function rangeBins(spectrum: Spectrum, use: SeriesUse, shown = 1): RangeBin[] {
   const { kept } = gateSpectrum(spectrum, unfactoredGate(use));
-  const largest = shown * Math.max(largestOf(kept.ranges), largestOf(kept.halfRanges));
+  const { ranges, halfRanges, added } = kept;
+  const lists = [ranges, halfRanges, ...(added === undefined ? [] : [added.ranges])];
+  const largest = shown * Math.max(...lists.map(largestOf));
   if (largest === 0) return [];
   const width = roundWidth(largest / MOST_BINS);
   const table = actingTable(spectrum, use);
   return Array.from({ length: Math.floor(largest / width) + 1 }, (_, bin) => {
-    const inBin = (range: number) => Math.floor((shown * range) / width) === bin;
-    const whole = kept.ranges.filter(inBin);
-    const half = kept.halfRanges.filter(inBin);
-    const damage = damageOf({ ranges: whole, halfRanges: half }, table, use).sum;
+    const part = filterSpectrum(kept, (range) => Math.floor((shown * range) / width) === bin);
+    const damage = damageOf(part, table, use).sum;
     return {
       from: bin * width,
       to: (bin + 1) * width,
-      count: whole.length + 0.5 * half.length,
+      count: cyclesOf(part),
       cyclesToFailure: cyclesAt(((bin + 0.5) * width) / shown, table, use),
       damage: use.table === null ? null : damage,
     };

@@ -4,16 +4,17 @@ import { InputError, type Issue, wordIssue } from '../issue.ts';
 import type { Job } from '../model.ts';
 import { readCurveRows } from './curve-rows.ts';
 import { readCurves } from './curves.ts';
+import { doubtTogether } from './doubts.ts';
 import { readExtremes } from './extremes.ts';
 import { readFasteners } from './fasteners.ts';
 import { type Files, filesOf } from './files.ts';
-import { type Findings, report } from './findings.ts';
+import { type Findings, noFindings, report } from './findings.ts';
 import { JOB_KEYS } from './keys.ts';
 import { readMembers } from './members.ts';
 import { readKeys } from './read-keys.ts';
 import { readRecordBasis } from './record-basis.ts';
 import { readRuns } from './runs.ts';
-import { readCounting, readLimits, readRemedies } from './settings.ts';
+import { readCounting, readLimits, readRemedies, readWarming } from './settings.ts';
 import { emptyMap, placeOf, type Source, type SourceMap } from './source.ts';
 import { readTable } from './table.ts';
 import { readYaml } from './yaml.ts';
@@ -31,7 +32,7 @@ export async function readJob(path: string): Promise<Job> {
   const jobFile = found?.isDirectory() ? join(path, 'job.yaml') : path;
   const name = basename(jobFile);
   const files = filesOf(dirname(jobFile));
-  const findings: Findings = { issues: [], defaults: [], warnings: [] };
+  const findings = noFindings();
   const text = await files.read(name, { file: jobFile }, findings);
   const map = text === null ? null : readYaml(text, name, findings);
   const job = map === null ? null : await readWhole(map, files, findings);
@@ -52,6 +53,7 @@ async function readWhole(map: SourceMap, files: Files, findings: Findings): Prom
   const limits = readLimits(part('limits'), findings);
   const counting = readCounting(part('counting'), findings);
   const remedies = readRemedies(part('remedies'), findings);
+  const warming = readWarming(values.warming ?? null, findings);
 
   const curveRows = await readCurveRows(values.curves ?? null, files, findings);
   const curves = await readCurves(curveRows, findings);
@@ -68,12 +70,15 @@ async function readWhole(map: SourceMap, files: Files, findings: Findings): Prom
 
   if (!complete || basis === null || limits === null) return null;
   if (counting === null || remedies === null) return null;
+  doubtTogether([...zones.items.values()], runs, findings);
   return {
     title: values.title,
     units: values.units,
     axis: basis.axis,
     zones: [...zones.items.values()],
     represents: basis.represents,
+    weather: basis.weather,
+    warming,
     extremes,
     limits,
     counting,
@@ -83,6 +88,7 @@ async function readWhole(map: SourceMap, files: Files, findings: Findings): Prom
     runs,
     inputs: files.inputs,
     defaults: findings.defaults,
+    derived: findings.derived,
     warnings: findings.warnings,
   };
 }

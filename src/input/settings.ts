@@ -1,8 +1,9 @@
-import type { CountingSettings, Limits, RemedySettings } from '../model.ts';
+import type { CountingSettings, Limits, RemedySettings, Warming } from '../model.ts';
 import type { Findings } from './findings.ts';
 import { COUNTING_KEYS, LIMITS_KEYS, REMEDY_KEYS } from './keys.ts';
 import { readKeys } from './read-keys.ts';
 import type { SourceMap } from './source.ts';
+import { WARMING_KEYS } from './sun-keys.ts';
 
 /** The job's limits and factors; `null` with a fault, which is reported. */
 export function readLimits(map: SourceMap, findings: Findings): Limits | null {
@@ -23,7 +24,7 @@ export function readCounting(map: SourceMap, findings: Findings): CountingSettin
   const { complete, values } = readKeys(COUNTING_KEYS, map, 'counting.', findings);
   if (!complete) return null;
   const { residue, force_gate: forceGate, stress_gate: stressGate } = values;
-  return { residue, forceGate, stressGate };
+  return { residue, forceGate, stressGate, extremesCycle: values.extremes_cycle };
 }
 
 /** What remedies may propose; `null` with a fault, which is reported. */
@@ -41,4 +42,11 @@ export function readRemedies(map: SourceMap, findings: Findings): RemedySettings
     slottedGripShare: values.slotted_grip_share,
     gripSpread: values.grip_spread,
   };
+}
+
+/** The what-if of warmer zones; `null` for none, or with a fault, which is reported. */
+export function readWarming(map: SourceMap | null, findings: Findings): Warming | null {
+  if (map === null) return null;
+  const { complete, values } = readKeys(WARMING_KEYS, map, 'warming.', findings);
+  return complete ? { add: values.add, dailySwing: values.daily_swing } : null;
 }

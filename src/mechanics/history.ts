@@ -9,8 +9,11 @@ import { FROM_LOCK_IN, legToExtreme, type StrainPath } from './strain-path.ts';
 export interface PassCounter {
   /** A pass begins: forget the one before. */
   begin(): void;
-  /** Forces of `rows` moments, row-major: fasteners (n a row) and spans (n − 1 a row) [N]. */
-  take(fasteners: Float64Array, spans: Float64Array, rows: number): void;
+  /**
+   * Forces of `rows` moments, row-major: fasteners (n a row) and spans (n − 1 a row) [N], and how far along the record's
+   * path each moment lies.
+   */
+  take(fasteners: Float64Array, spans: Float64Array, rows: number, marks: Float64Array): void;
 }
 
 /** What a record does to a run. All forces are a connection's, tension of a span positive [N]. */
@@ -197,6 +200,6 @@ class Follower {
     spanForces(values, this.spans, this.chain.count, rows);
     widen(this.counting ? this.countedShear : this.allShear, values, marks, rows);
     widen(this.counting ? this.countedSpans : this.allSpans, this.spans, marks, rows);
-    if (this.counting) this.counter.take(values, this.spans, rows);
+    if (this.counting) this.counter.take(values, this.spans, rows, marks);
   }
 }

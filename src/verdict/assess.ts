@@ -3,21 +3,23 @@ import { rangeBins } from '../damage/range-bins.ts';
 import type { Chain } from '../mechanics/chain.ts';
 import { followRecord, type History } from '../mechanics/history.ts';
 import { traceConnection } from '../mechanics/trace.ts';
-import type { Job, Run, RunResult, Trace } from '../model.ts';
+import type { Job, Run, RunResult, Trace, YearDamage } from '../model.ts';
 import { assessConnection, fastenerSpectrum, fastenerUse } from './connection.ts';
+import { extremesCycle } from './extremes-cycle.ts';
 import { governingConnection } from './governing-connection.ts';
 import { createPassCounters } from './pass-counters.ts';
 import { runChain } from './run-chain.ts';
 import { type RunRecord, runRecord } from './run-record.ts';
 import type { RunScene } from './run-scene.ts';
 import { assessSpan, memberUse, type SpanLoad, spanSpectrum, worseSpan } from './span-load.ts';
+import { yearByYear } from './year-by-year.ts';
 
 /** A force under this share of EA times the largest strain is rounding. */
 const NOISE = 1e-9;
 
 /** A run's demands, checks and verdicts, without the bins and the trace that only tables and charts show. */
 export interface RunAssessment
-  extends Omit<RunResult, 'fastenerBins' | 'memberBins' | 'trace' | 'remedy'> {
+  extends Omit<RunResult, 'fastenerBins' | 'memberBins' | 'trace' | 'yearByYear' | 'remedy'> {
   /** All that the record does to the run. */
   readonly history: History;
 }
@@ -31,17 +33,22 @@ export interface RunAssessment
  * @param tables damage tables shared by all runs of the job
  */
 export function assessRun(run: Run, job: Job, tables: DamageTables): RunResult {
-  const { assessment, scene, spans, chain, strain } = followRun(run, job, tables);
+  const { assessment, scene, spans, chain, record } = followRun(run, job, tables);
   const { history: _, ...facts } = assessment;
   const { governing } = facts;
   let trace: Trace | null = null;
+  let years: readonly YearDamage[] | null = null;
   return {
     ...facts,
     ...binsOf(scene, spans, governing),
     remedy: null,
     trace: () => {
-      trace ??= traceOf(chain, strain, scene, spans, governing);
+      trace ??= traceOf(chain, record.strain, scene, spans, governing);
       return trace;
+    },
+    yearByYear: () => {
+      years ??= yearByYear(scene, chain, record.path);
+      return years;
     },
   };
 }
@@ -70,7 +77,7 @@ interface FollowedRun {
   readonly scene: RunScene;
   readonly spans: readonly SpanLoad[];
   readonly chain: Chain;
-  readonly strain: Float64Array;
+  readonly record: RunRecord;
 }
 
 function followRun(
@@ -87,19 +94,26 @@ function followRun(
   };
   const history = followRecord(chain, record.path, options, counters);
   const noise = NOISE * chain.axialStiffness * record.largestStrain;
-  const { years, when } = record;
-  const scene: RunScene = { run, job, tables, history, counters, years, noise, when };
+  const { years, coveredHours, when } = record;
+  const cycle = job.counting.extremesCycle ? extremesCycle(run, record.extremes) : null;
+  const scene: RunScene = {
+    run,
+    job,
+    tables,
+    history,
+    counters,
+    years,
+    coveredHours,
+    extremesCycle: cycle,
+    noise,
+    when,
+  };
   const spans = counters.spans.map((_, j) => assessSpan(scene, j));
-  const assessment = assessmentOf(scene, spans, record.coveredHours);
-  return { assessment, scene, spans, chain, strain: record.strain };
+  return { assessment: assessmentOf(scene, spans), scene, spans, chain, record };
 }
 
-function assessmentOf(
-  scene: RunScene,
-  spans: readonly SpanLoad[],
-  coveredHours: number,
-): RunAssessment {
-  const { run, history, years } = scene;
+function assessmentOf(scene: RunScene, spans: readonly SpanLoad[]): RunAssessment {
+  const { run, history, years, coveredHours, extremesCycle: cycle } = scene;
   const connections = run.roles.map((_, i) => assessConnection(scene, spans, i));
   return {
     run,
@@ -109,6 +123,7 @@ function assessmentOf(
     driftPerYear: history.walks ? largest(history.drift) / years : 0,
     years,
     coveredHours,
+    extremesCycle: cycle === null ? null : { hot: cycle.hot, cold: cycle.cold },
     connections,
     ends: endsOf(scene),
     governing: governingConnection(connections),

@@ -1,6 +1,7 @@
 import { minerDamage, type SeriesUse } from '../damage/miner.ts';
 import type { Connection, Damage, Demand, Spectrum } from '../model.ts';
 import { type ConnectionDemands, checksOf } from './checks.ts';
+import { withExtremesCycle } from './extremes-cycle.ts';
 import { judge } from './judge.ts';
 import type { RunScene } from './run-scene.ts';
 import { scaleSpectrum } from './scale-spectrum.ts';
@@ -8,9 +9,11 @@ import { rangeText, type SpanLoad, worseSpan } from './span-load.ts';
 import { unevenFriction } from './uneven-friction.ts';
 
 /** Counted shear ranges of one fastener of connection i [N]. */
-export function fastenerSpectrum({ run, job, counters, noise }: RunScene, i: number): Spectrum {
+export function fastenerSpectrum(scene: RunScene, i: number): Spectrum {
+  const { run, job, counters, noise } = scene;
   const counted = counters.fasteners[i].finish(job.counting.residue, noise);
-  return scaleSpectrum(counted, 1 / run.fasteners[i].perConnection);
+  const whole = withExtremesCycle(counted, scene, ({ fasteners }) => fasteners[i]);
+  return scaleSpectrum(whole, 1 / run.fasteners[i].perConnection);
 }
 
 /** How a fastener's force ranges are turned to damage. */
@@ -139,7 +142,7 @@ function perYear({ sum }: Damage, years: number): number | null {
 }
 
 /** Allowed Miner sum over the larger damage a year [years]. */
-function lifeOf(damages: readonly (number | null)[], allowed: number): number | null {
+export function lifeOf(damages: readonly (number | null)[], allowed: number): number | null {
   const given = damages.filter((damage) => damage !== null);
   return given.length === 0 ? null : allowed / Math.max(...given);
 }

@@ -5,6 +5,7 @@ import { searchFor, utilisationOf } from './candidate.ts';
 import { firstLargest } from './first-largest.ts';
 import { withJointGaps } from './joint-gaps.ts';
 import { remedyOf } from './remedy.ts';
+import { warmedRuns } from './warmed.ts';
 import { withVerdicts } from './with-verdicts.ts';
 
 /**
@@ -22,5 +23,10 @@ export function screen(job: Job, options: { readonly remedies?: boolean } = {}):
       ? run
       : withVerdicts({ ...run, remedy: remedyOf(run, searchFor(run.run, job, tables)) });
   const runs = options.remedies === false ? assessed : assessed.map(remedied);
-  return { job, runs, governing: firstLargest(runs.map(utilisationOf)) };
+  return {
+    job,
+    runs,
+    warmed: warmedRuns(job, tables),
+    governing: firstLargest(runs.map(utilisationOf)),
+  };
 }

@@ -1,6 +1,7 @@
 import { minerDamage, type SeriesUse } from '../damage/miner.ts';
 import { bucklingResistance } from '../mechanics/buckling.ts';
 import type { Damage, Demand, Member, Spectrum } from '../model.ts';
+import { withExtremesCycle } from './extremes-cycle.ts';
 import type { RunScene } from './run-scene.ts';
 import { scaleSpectrum } from './scale-spectrum.ts';
 
@@ -16,9 +17,11 @@ export interface SpanLoad {
 }
 
 /** Counted stress ranges of span j [MPa]. */
-export function spanSpectrum({ run, job, counters, noise }: RunScene, j: number): Spectrum {
+export function spanSpectrum(scene: RunScene, j: number): Spectrum {
+  const { run, job, counters, noise } = scene;
   const counted = counters.spans[j].finish(job.counting.residue, noise);
-  return scaleSpectrum(counted, stressOf(run.member));
+  const whole = withExtremesCycle(counted, scene, ({ spans }) => spans[j]);
+  return scaleSpectrum(whole, stressOf(run.member));
 }
 
 /** How the member's stress ranges are turned to damage. */

@@ -90,7 +90,8 @@ export function makeResult(recipe: ResultRecipe = {}): Result {
     ],
     warnings: ['curves weld: scatter is given for a curve that is a characteristic one already'],
   };
-  return { job, runs: results, governing: utilisations.indexOf(Math.max(...utilisations)) };
+  const governing = utilisations.indexOf(Math.max(...utilisations));
+  return { job, runs: results, warmed: null, governing };
 }
 
 function makeAxis(hours: number): RecordAxis {
@@ -233,6 +234,8 @@ function makeRunResult(recipe: RunRecipe, zones: readonly Zone[], axis: RecordAx
     fastenerBins: makeBins(worst.shearRange, worst.fastenerDamage, fastener.curve),
     memberBins: makeBins(worst.stressRange, worst.memberDamage, run.member.curve),
     remedy: null,
+    extremesCycle: null,
+    yearByYear: () => [],
     trace: () => ({
       shear: strain.map((e) => e * shear[governing]),
       spanForce: strain.map((e) => -e * shear[governing] * 1.7),

@@ -1,6 +1,5 @@
 import { quantileSeq } from 'mathjs';
 import { describe, expect, it } from 'vitest';
-import { calendarYears } from '../../src/temperature/calendar-years.ts';
 import { dailySwings } from '../../src/temperature/daily-swings.ts';
 import { quantile } from '../../src/temperature/quantile.ts';
 import { scaleDailySwing } from '../../src/temperature/scale-daily-swing.ts';
@@ -27,17 +26,6 @@ describe('quantiles', () => {
     for (const share of [0, 0.05, 0.33, 0.5, 0.9, 1]) {
       expect(quantile(values, share)).toBeCloseTo(quantileSeq(Array.from(values), share), 12);
     }
-  });
-});
-
-describe('calendar years', () => {
-  it('part a record at New Year', () => {
-    const times = axisOf(Date.UTC(2030, 11, 31, 22), 24 * 366 + 4).times;
-    expect(calendarYears(times)).toEqual([
-      { year: 2030, from: 0, to: 2 },
-      { year: 2031, from: 2, to: 2 + 8760 },
-      { year: 2032, from: 8762, to: 8788 },
-    ]);
   });
 });
 
