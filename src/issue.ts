@@ -33,16 +33,20 @@ export class InputError extends Error {
   }
 }
 
-/** The issue as one message of one to three lines: place, found and expected, and how to mend it. */
-export function wordIssue(issue: Issue): string {
-  const { file, line, column, cell, key } = issue.place;
+/** A place in words, such as `runs.csv:2:8 (cell C2)  spacing [mm]`. */
+export function wordPlace({ file, line, column, cell, key }: Place): string {
   const position = [file, line, column].filter((part) => part !== undefined).join(':');
   const where = cell === undefined ? position : `${position} (cell ${cell})`;
-  const subject = key === undefined ? '' : `${key}: `;
+  return key === undefined ? where : `${where}  ${key}`;
+}
+
+/** The issue as one message of one to three lines: place, found and expected, and how to mend it. */
+export function wordIssue(issue: Issue): string {
   const found = issue.found === undefined ? 'nothing stands here' : `found ${quote(issue.found)}`;
   const nearest = issue.nearest === undefined ? '' : ` Did you mean ${quote(issue.nearest)}?`;
   const hint = issue.hint === undefined ? '' : `\n    ${issue.hint}`;
-  return `${where}  ${subject}${found}, expected ${issue.expected}.${nearest}${hint}`;
+  const where = `${wordPlace(issue.place)}${issue.place.key === undefined ? '  ' : ': '}`;
+  return `${where}${found}, expected ${issue.expected}.${nearest}${hint}`;
 }
 
 /** How many issues are told in full unless all are asked for. */

@@ -114,8 +114,40 @@ export interface RecordAxis {
   readonly times: Float64Array;
   /** Median step between samples [h]. */
   readonly stepHours: number;
+  /** The step in force at each sample [h], where it changes in the record; else `null`. */
+  readonly sampleHours: Float64Array | null;
   /** Rows missing between sample i−1 and i that were short enough to be filled, as hours [h]. */
   readonly filledHoursBefore: Float64Array;
+}
+
+/** What judging a record can find. */
+export const RECORD_FINDINGS = [
+  'gap',
+  'repeat',
+  'disorder',
+  'out of band',
+  'stuck',
+  'spike',
+  'jump',
+  'jump between files',
+  'channels apart',
+  'step changes',
+  'doubled hour once',
+] as const;
+export type RecordFindingKind = (typeof RECORD_FINDINGS)[number];
+
+/** Something doubtful in the record, and what was done about it. */
+export interface RecordFinding {
+  readonly kind: RecordFindingKind;
+  /** Where it begins [ms on the record's clock]. */
+  readonly time: number;
+  /** The channel; blank where it is all of them. */
+  readonly channel: string;
+  /** The doubtful value [°C]; `null` where there is none. */
+  readonly value: number | null;
+  /** How long it lasts [h]; `null` where it is one row. */
+  readonly hours: number | null;
+  readonly done: string;
 }
 
 /** A member's flexural-buckling rule. */

@@ -1,9 +1,11 @@
 import type { Curve, Fastener } from '../model.ts';
+import { checkGrip, gripOf } from './fastener-grip.ts';
+import { checkStiffness, stiffnessOf } from './fastener-stiffness.ts';
 import { type Findings, report } from './findings.ts';
 import { FASTENER_KEYS } from './keys.ts';
 import { type Library, lookUp, uniqueIds } from './library.ts';
 import { readKeys } from './read-keys.ts';
-import { givenText, givenValue, placeOf, type SourceMap } from './source.ts';
+import { givenText, placeOf, type SourceMap } from './source.ts';
 import type { Values } from './values.ts';
 import { WARNINGS } from './warnings.ts';
 
@@ -30,18 +32,20 @@ function readFastener(row: SourceMap, curves: Library<Curve>, findings: Findings
   const before = findings.issues.length;
   const curve = lookUp(curves, row, 'curve', findings);
   checkStiffness(row, findings);
+  checkGrip(row, findings);
   checkShearArea(values, curve, row, findings);
   checkNeeds(values, row, findings);
   if (!complete || findings.issues.length > before) return null;
-  if (values.grip > 0 && values.free_play === 0) {
+  const grip = gripOf(values, prefix, findings);
+  if (grip > 0 && values.free_play === 0) {
     findings.warnings.push(WARNINGS.gripWithoutPlay(values.id));
   }
   return {
     id: values.id,
     perConnection: values.per_connection,
-    stiffness: stiffnessOf(values),
+    stiffness: stiffnessOf(values, prefix, findings),
     freePlay: values.free_play,
-    grip: values.grip,
+    grip,
     shearArea: values.shear_area,
     shearResistance: values.shear_resistance,
     tensionResistance: values.tension_resistance,
@@ -55,25 +59,11 @@ function readFastener(row: SourceMap, curves: Library<Curve>, findings: Findings
   };
 }
 
-function stiffnessOf({ stiffness, shear_displacement: displaced }: FastenerValues): number | null {
-  return stiffness === 'rigid' ? null : (stiffness ?? displaced);
-}
-
 /** The limit as a force [N]; one in stress times the shear area. */
 function shearRangeLimitOf(values: FastenerValues): number | null {
   const limit = values.shear_range_limit;
   if (limit === null) return null;
   return limit.of === 'force' ? limit.value : limit.value * (values.shear_area ?? 0);
-}
-
-function checkStiffness(row: SourceMap, findings: Findings): void {
-  const given = ['stiffness', 'shear_displacement'].filter((key) => givenValue(row, key));
-  if (given.length === 1) return;
-  const place = placeOf(row, given.length === 0 ? 'stiffness' : 'shear_displacement');
-  report(findings, place, {
-    ...(given.length === 0 ? {} : { found: 'both' }),
-    expected: 'either stiffness, such as 2 kN/mm, or shear_displacement, such as 2.0 mm at 10 kN',
-  });
 }
 
 function checkShearArea(

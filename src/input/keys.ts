@@ -1,4 +1,13 @@
 import type { Quantity } from '../units.ts';
+import {
+  BAND_KEYS,
+  JUDGING_KEYS,
+  JUMPS_KEYS,
+  RECORD_FORM_KEYS,
+  SPIKES_KEYS,
+  STUCK_KEYS,
+  TIME_KEYS,
+} from './record-keys.ts';
 import { OVERHANG_KEYS, SITE_KEYS, SUN_KEYS, SUNLIT_ZONE_KEYS, WARMING_KEYS } from './sun-keys.ts';
 
 /** How a value is written and read. A quantity is a number with its unit. */
@@ -8,6 +17,7 @@ export type Kind =
   | 'number'
   | 'whole number'
   | 'lengths'
+  | 'texts'
   | 'text'
   | 'id'
   | 'name'
@@ -42,6 +52,10 @@ export interface Key {
   readonly to?: number;
   /** The value is under this. */
   readonly under?: number;
+  /** Values outside these, in base units, are read and doubted aloud (common practice, no source). */
+  readonly usual?: readonly [from: number, to: number];
+  /** What is likely wrong with a value beyond its bounds, a whole sentence. */
+  readonly slip?: string;
   readonly example: string;
   readonly meaning: string;
 }
@@ -54,10 +68,30 @@ export const HOTTEST = 500;
 
 /** Nothing that this trade builds is beyond these [mm, mm², N, 1/K]: a slip of the unit is. */
 const LENGTH = { kind: 'length', to: 1e8 } as const;
-const AREA = { kind: 'area', over: 0, to: 1e9 } as const;
+const AREA = {
+  kind: 'area',
+  over: 0,
+  to: 1e8,
+  usual: [0.5, 3e5],
+  slip: 'Is it in mm^2?',
+} as const;
+const MODULUS = {
+  kind: 'stress',
+  from: 1e3,
+  to: 1e6,
+  usual: [1e4, 4.2e5],
+  slip: 'Metals have 15 to 400 GPa: aluminium 70 GPa, 70000 MPa or 10000 ksi.',
+} as const;
+const INERTIA = { kind: 'second moment of area', over: 0, to: 1e12 } as const;
 const FORCE = { kind: 'force', to: 1e12 } as const;
 const TEMPERATURE = { kind: 'temperature', from: COLDEST, to: HOTTEST } as const;
-const EXPANSION = { kind: 'expansion', over: 0, to: 1e-2 } as const;
+const EXPANSION = {
+  kind: 'expansion',
+  from: 1e-7,
+  to: 1e-3,
+  usual: [3e-6, 4e-5],
+  slip: 'Metals have 5e-6 to 35e-6 / K: for steel write 12e-6 / K, or 12 under a header [1e-6/K].',
+} as const;
 const FACTOR = { kind: 'number', over: 0, to: 100 } as const;
 
 export const JOB_KEYS = {
@@ -125,10 +159,16 @@ export const JOB_KEYS = {
 export const RECORD_KEYS = {
   file: {
     kind: 'text',
-    required: true,
+    needs: 'this or `files`',
     example: 'record.csv',
     meaning:
       'CSV with a column `time` (2031-01-01T00:00) and one column a channel with its unit in the header, such as `deck [degC]`; or an hourly weather file in the EPW layout, with the channels `air`, `global`, `direct`, `diffuse` and `wind`.',
+  },
+  files: {
+    kind: 'texts',
+    needs: 'this or `file`',
+    example: '[spring.csv, summer.csv]',
+    meaning: 'CSVs of one logger, one after another.',
   },
   layout: {
     kind: 'choice',
@@ -168,8 +208,10 @@ export const RECORD_KEYS = {
     kind: 'map',
     example: '{ date: time, temp: { channel: air, unit: degC } }',
     meaning:
-      'For a CSV with headers of its own: which column is the time and which are channels. Columns left out are not read.',
+      'For a CSV with headers of its own: which column is the time and which are channels. Of a time in two columns one is `date` and one `time`. Columns left out are not read.',
   },
+  ...RECORD_FORM_KEYS,
+  ...JUDGING_KEYS,
 } as const satisfies KeyTable;
 
 export const GAPS_KEYS = {
@@ -225,6 +267,7 @@ export const LIMITS_KEYS = {
     kind: 'years',
     over: 0,
     to: 1e4,
+    usual: [1, 200],
     default: '50 years',
     example: '50 years',
     meaning: 'Time that damage and drift are reckoned for.',
@@ -237,6 +280,7 @@ export const LIMITS_KEYS = {
   },
   load_factor: {
     ...FACTOR,
+    usual: [0.5, 3],
     default: '1.0',
     example: '1.0',
     meaning: 'Factor on every range, from the side of the load.',
@@ -255,6 +299,7 @@ export const LIMITS_KEYS = {
   },
   static_factor: {
     ...FACTOR,
+    usual: [0.9, 4],
     default: '1.5',
     example: '1.5',
     meaning: 'Factor on peak forces in the static checks.',
@@ -297,10 +342,8 @@ export const COUNTING_KEYS = {
 export const MEMBER_KEYS = {
   id: { kind: 'id', required: true, example: 'rail', meaning: 'Name of the member.' },
   modulus: {
-    kind: 'stress',
+    ...MODULUS,
     required: true,
-    from: 1,
-    to: 1e8,
     example: '70 GPa',
     meaning: "Young's modulus E.",
   },
@@ -313,22 +356,38 @@ export const MEMBER_KEYS = {
   area: { ...AREA, required: true, example: '450 mm^2', meaning: 'Gross area A.' },
   net_area: {
     ...AREA,
-    needs: 'the gross area where not given',
+    needs: 'by `hole`, or the gross area, where not given',
     example: '400 mm^2',
     meaning: 'Area left at a fastener.',
   },
-  inertia: {
-    kind: 'second moment of area',
+  hole: {
+    ...LENGTH,
     over: 0,
-    to: 1e15,
+    usual: [2, 60],
+    needs: 'with `thickness`, in place of `net_area`',
+    example: '14 mm',
+    meaning: 'Width of a hole: the net area is the area less holes × hole × thickness.',
+  },
+  holes: {
+    kind: 'whole number',
+    from: 1,
+    to: 100,
+    needs: '1 where not given; with `hole` only',
+    example: '2',
+    meaning: 'Holes side by side in one section.',
+  },
+  inertia: {
+    ...INERTIA,
     needs: 'required with `buckling`',
     example: '16000 mm^4',
     meaning: 'Second moment of area about the weak axis.',
   },
   yield: {
     kind: 'stress',
-    over: 0,
-    to: 1e5,
+    from: 1,
+    to: 5e3,
+    usual: [20, 2e3],
+    slip: 'Metals yield at 30 to 1500 MPa, 5 to 200 ksi.',
     needs: 'required with `buckling`',
     example: '160 MPa',
     meaning: 'Yield strength f_y.',
@@ -370,8 +429,9 @@ export const MEMBER_KEYS = {
   thickness: {
     ...LENGTH,
     over: 0,
+    usual: [0.3, 200],
     example: '25 mm',
-    meaning: "Thickness, for the curve's thickness factor.",
+    meaning: "Thickness, for the curve's thickness factor and the area of a hole.",
   },
   curve: {
     kind: 'name',
@@ -399,6 +459,7 @@ export const FASTENER_KEYS = {
     kind: 'stiffness or rigid',
     over: 0,
     to: 1e15,
+    usual: [10, 1e7],
     needs: 'this or `shear_displacement`',
     example: '2 kN/mm',
     meaning: 'Shear stiffness, or `rigid`.',
@@ -409,9 +470,40 @@ export const FASTENER_KEYS = {
     example: '2.0 mm at 10 kN',
     meaning: 'Stiffness as a displacement at a shear force.',
   },
+  bracket_stiffness: {
+    kind: 'stiffness',
+    over: 0,
+    to: 1e15,
+    usual: [10, 1e7],
+    needs: 'this, the next three, or none',
+    example: '5 kN/mm',
+    meaning:
+      'Stiffness of the bracket that the fasteners of a connection hold; it acts in series with them.',
+  },
+  bracket_length: {
+    ...LENGTH,
+    over: 0,
+    usual: [5, 2000],
+    needs: 'with `bracket_modulus` and `bracket_inertia`',
+    example: '80 mm',
+    meaning: 'Length l of the bracket as a cantilever of stiffness 3EI/l³.',
+  },
+  bracket_modulus: {
+    ...MODULUS,
+    needs: 'see `bracket_length`',
+    example: '210 GPa',
+    meaning: "The bracket's modulus E.",
+  },
+  bracket_inertia: {
+    ...INERTIA,
+    needs: 'see `bracket_length`',
+    example: '4000 mm^4',
+    meaning: "The bracket's second moment of area I, bent along the member.",
+  },
   free_play: {
     ...LENGTH,
     from: 0,
+    usual: [0, 200],
     default: '0 mm',
     example: '9 mm',
     meaning:
@@ -420,9 +512,46 @@ export const FASTENER_KEYS = {
   grip: {
     ...FORCE,
     from: 0,
-    default: '0 N',
+    usual: [0, 1e6],
+    needs: 'by `tightening_torque`, or 0 N, where not given',
     example: '250 N',
     meaning: 'Friction force that the joint carries before it slips.',
+  },
+  tightening_torque: {
+    kind: 'torque',
+    over: 0,
+    to: 1e9,
+    usual: [100, 3e6],
+    needs: 'with `diameter`, `friction` and `grip_share`, in place of `grip`',
+    example: '40 N m',
+    meaning:
+      'Torque T that the bolt was tightened with: the grip is estimated as T/(torque_factor·diameter)·friction·grip_share.',
+  },
+  torque_factor: {
+    kind: 'number',
+    over: 0,
+    to: 1,
+    usual: [0.08, 0.4],
+    needs: '0.2 where not given; with `tightening_torque` only',
+    example: '0.18',
+    meaning: 'Torque over preload and diameter.',
+  },
+  friction: {
+    kind: 'number',
+    over: 0,
+    to: 1,
+    usual: [0.05, 0.6],
+    needs: 'with `tightening_torque` only',
+    example: '0.2',
+    meaning: 'Friction coefficient of the faces that slip.',
+  },
+  grip_share: {
+    kind: 'number',
+    over: 0,
+    to: 1,
+    needs: 'with `tightening_torque` only',
+    example: '0.5',
+    meaning: 'Share of the preload that is left after years.',
   },
   slotted_grip: {
     ...FORCE,
@@ -441,7 +570,8 @@ export const FASTENER_KEYS = {
     ...LENGTH,
     over: 0,
     example: '12 mm',
-    meaning: "Diameter of the bolt, for a slot's length in full.",
+    usual: [2, 60],
+    meaning: "Diameter of the bolt, for a slot's length in full and a grip by its tightening.",
   },
   shear_area: {
     ...AREA,
@@ -452,12 +582,16 @@ export const FASTENER_KEYS = {
   shear_resistance: {
     ...FORCE,
     over: 0,
+    usual: [50, 1e7],
+    slip: 'Is it in kN?',
     example: '20 kN',
     meaning: 'Design shear resistance V_Rd.',
   },
   tension_resistance: {
     ...FORCE,
     over: 0,
+    usual: [50, 1e7],
+    slip: 'Is it in kN?',
     example: '25 kN',
     meaning: 'Design tension resistance T_Rd.',
   },
@@ -742,6 +876,9 @@ export const RUN_KEYS = {
   spacing: {
     ...LENGTH,
     over: 0,
+    to: 2e5,
+    usual: [15, 15e3],
+    slip: 'Is it in mm?',
     needs: 'see `count`',
     example: '600 mm',
     meaning: 'From fastener to fastener.',
@@ -780,10 +917,11 @@ export const RUN_KEYS = {
     kind: 'temperature or time',
     from: COLDEST,
     to: HOTTEST,
-    required: true,
+    usual: [-40, 75],
+    default: '5 degC to 25 degC',
     example: '15 degC',
     meaning:
-      "The member's temperature when the fasteners were tightened, or the time, as in `at 2031-04-12T10:00`.",
+      "The member's temperature when the fasteners were tightened; or the time, as in `at 2031-04-12T10:00`; or what it may have been, `5 degC to 25 degC`, of which the middle is taken.",
   },
   structure_zone: {
     kind: 'name',
@@ -791,9 +929,9 @@ export const RUN_KEYS = {
     meaning: 'Zone of the structure behind, where it moves too.',
   },
   structure_expansion: {
-    kind: 'expansion',
+    ...EXPANSION,
     from: 0,
-    to: 1e-2,
+    usual: [0, 4e-5],
     needs: 'required with `structure_zone`',
     example: '10e-6 / K',
     meaning: 'Coefficient of thermal expansion α_s of the structure.',
@@ -884,7 +1022,12 @@ export function extremeTable(zones: readonly string[]): KeyTable {
 export const KEY_TABLES: readonly { readonly title: string; readonly keys: KeyTable }[] = [
   { title: 'job', keys: JOB_KEYS },
   { title: 'record', keys: RECORD_KEYS },
+  { title: 'record.time', keys: TIME_KEYS },
   { title: 'record.gaps', keys: GAPS_KEYS },
+  { title: 'record.band', keys: BAND_KEYS },
+  { title: 'record.stuck', keys: STUCK_KEYS },
+  { title: 'record.spikes', keys: SPIKES_KEYS },
+  { title: 'record.jumps', keys: JUMPS_KEYS },
   { title: 'record.columns, each column', keys: COLUMN_KEYS },
   { title: 'record.site', keys: SITE_KEYS },
   { title: 'zones, each zone', keys: ZONE_KEYS },

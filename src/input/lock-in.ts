@@ -1,11 +1,13 @@
-import type { Structure, Zone } from '../model.ts';
+import type { Run, Structure, Zone } from '../model.ts';
 import { temperatureAt } from '../temperature/zone.ts';
 import { type Findings, report } from './findings.ts';
+import type { WrittenTime } from './iso-time.ts';
 import { RUN_KEYS } from './keys.ts';
 import { lookUp } from './library.ts';
 import type { Clock, RunParts } from './run-parts.ts';
 import { givenText, givenValue, placeOf, type SourceMap } from './source.ts';
-import type { Values } from './values.ts';
+import type { KindValues, Values } from './values.ts';
+import { WARNINGS } from './warnings.ts';
 
 type RunValues = Partial<Values<typeof RUN_KEYS>>;
 
@@ -19,7 +21,7 @@ export function lockInTime(
   clock: Clock | null,
   findings: Findings,
 ): number | null {
-  if (lockIn === undefined || typeof lockIn === 'number' || clock === null) return null;
+  if (lockIn === undefined || !isTime(lockIn) || clock === null) return null;
   const found = givenText(row, 'lock_in') ?? '';
   const place = placeOf(row, 'lock_in');
   if (lockIn.offset !== null && clock.offset === null) {
@@ -34,7 +36,11 @@ export function lockInTime(
   return report(findings, place, { found, expected });
 }
 
-/** The member's lock-in temperature [°C]: as given, or its zone's at the time given. */
+function isTime(lockIn: KindValues['temperature or time']): lockIn is WrittenTime {
+  return typeof lockIn === 'object' && 'local' in lockIn;
+}
+
+/** The member's lock-in temperature [°C]: as given, the middle of a range, or its zone's at the time given. */
 export function lockInOf(
   { lock_in: lockIn }: RunValues,
   zone: Zone | null,
@@ -42,7 +48,20 @@ export function lockInOf(
   clock: Clock | null,
 ): number | null {
   if (typeof lockIn === 'number') return lockIn;
+  if (lockIn !== undefined && !isTime(lockIn)) return (lockIn.from + lockIn.to) / 2;
   return zone && clock && time !== null ? temperatureAt(zone, clock.axis, time) : null;
+}
+
+/** Notes where the lock-in temperature is worked out, and warns where nothing was given at all. */
+export function noteLockIn(run: Run, row: SourceMap, values: RunValues, findings: Findings): void {
+  const { lock_in: lockIn } = values;
+  if (lockIn === undefined || typeof lockIn === 'number') return;
+  const how = isTime(lockIn)
+    ? `zone ${run.zone.name} at the time given`
+    : `the middle of ${lockIn.text}`;
+  const key = `runs ${run.id}: lock_in`;
+  findings.derived.push({ key, value: run.lockIn, quantity: 'temperature', how });
+  if (!givenValue(row, 'lock_in')) findings.warnings.push(WARNINGS.lockInAssumed(run.id));
 }
 
 interface StructureParts extends RunParts {
@@ -103,9 +122,9 @@ function structureLockIn(
     note(`zone ${zone.name} at the time of lock_in`);
     return temperatureAt(zone, clock.axis, time);
   }
-  if (typeof lockIn !== 'number') return null;
+  if (lockIn === undefined || isTime(lockIn)) return null;
   return report(findings, placeOf(row, 'structure_lock_in'), {
-    expected: 'a temperature, such as 18 degC, since lock_in is one and no time',
+    expected: 'a temperature, such as 18 degC, since lock_in is no time',
   });
 }
 

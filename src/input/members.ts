@@ -2,6 +2,7 @@ import type { BucklingRule, Curve, Member } from '../model.ts';
 import { type Findings, report } from './findings.ts';
 import { MEMBER_KEYS } from './keys.ts';
 import { type Library, lookUp, uniqueIds } from './library.ts';
+import { checkHole, netAreaOf } from './net-area.ts';
 import { readKeys } from './read-keys.ts';
 import { givenText, placeOf, type SourceMap } from './source.ts';
 import type { Values } from './values.ts';
@@ -31,12 +32,10 @@ function readMember(row: SourceMap, curves: Library<Curve>, findings: Findings):
   const curve = lookUp(curves, row, 'curve', findings);
   checkCurve(curve, row, findings);
   checkNetArea(values, row, findings);
+  checkHole(values, row, findings);
   checkBuckling(values, row, findings);
   if (!complete || findings.issues.length > before) return null;
   const { area } = values;
-  if (values.net_area === null) {
-    findings.defaults.push({ key: `${prefix}net_area`, value: 'the gross area' });
-  }
   if (curve?.thicknessEffect && values.thickness === null) {
     findings.warnings.push(WARNINGS.thicknessUnknown(values.id, curve.id));
   }
@@ -45,7 +44,7 @@ function readMember(row: SourceMap, curves: Library<Curve>, findings: Findings):
     modulus: values.modulus,
     expansion: values.expansion,
     area,
-    netArea: values.net_area ?? area,
+    netArea: netAreaOf(values, prefix, findings),
     inertia: values.inertia,
     yield: values.yield,
     buckling: bucklingOf(values),

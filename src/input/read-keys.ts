@@ -4,6 +4,7 @@ import type { Key, KeyTable } from './keys.ts';
 import { nearestName } from './nearest-name.ts';
 import { readValue } from './read-value.ts';
 import { givenValue, placeOf, type Source, type SourceMap } from './source.ts';
+import { doubtUnusual } from './unusual.ts';
 import type { Fault, Values } from './values.ts';
 import { wanted } from './wanted.ts';
 
@@ -29,7 +30,10 @@ export function readKeys<T extends KeyTable>(
   const given = givenOrDefault(table, map, prefix, findings);
   const schema = schemaOf(table);
   const whole = schema.safeParse(given);
-  if (whole.success) return { complete: true, values: withNulls(table, whole.data) };
+  if (whole.success) {
+    doubtUnusual(table, map, whole.data, findings);
+    return { complete: true, values: withNulls(table, whole.data) };
+  }
   const { issues } = whole.error;
   const unknown = issues.flatMap((issue) => (issue.code === 'unrecognized_keys' ? issue.keys : []));
   const meant = unknown.map((name) => reportUnknown(name, table, map, findings));
@@ -139,8 +143,9 @@ function reportUnknown(
   const free = Object.keys(table).filter((key) => !map.entries.has(key));
   report(findings, place, {
     found: name,
-    expected: free.length === 0 ? 'no further key' : `one of ${free.join(', ')}`,
-    ...(nearest === undefined ? {} : { nearest }),
+    ...(nearest === undefined
+      ? { expected: free.length === 0 ? 'no further key' : `one of ${free.join(', ')}` }
+      : { expected: 'a known name', nearest }),
     // In «{ area: 1,250 mm^2 }» the comma ends the value, and what follows it reads as a key.
     ...(/^\d/.test(name) ? { hint: COMMA_HINT } : {}),
   });

@@ -8,9 +8,9 @@ import {
 } from '../units.ts';
 import { boundsText, isWithin } from './bounds.ts';
 import { columnUnitFault } from './column-unit.ts';
-import { readIsoTime } from './iso-time.ts';
 import type { Key, Kind } from './keys.ts';
-import { readFixed, readLengths, readPoints } from './read-list.ts';
+import { readFixed, readLengths, readPoints, readTexts } from './read-list.ts';
+import { readLockIn } from './read-lock-in.ts';
 import type { Source, SourceText } from './source.ts';
 import {
   type ConstantValue,
@@ -68,9 +68,10 @@ const READERS: { readonly [K in Kind]: Reader<KindValues[K]> } = {
   choice: text(readChoice),
   'stiffness or rigid': text(readStiffness),
   'length at force': text(readLengthAtForce),
-  'temperature or time': text(readTemperatureOrTime),
+  'temperature or time': text(readLockIn(quantity('temperature'))),
   constant: text(readConstant),
   lengths: (source, key) => readLengths(source, key, text(quantity('length'))),
+  texts: readTexts,
   fixed: (source, key) => readFixed(source, key, text(readWholeNumber)),
   points: (source, key) => readPoints(source, key, text(readPlainNumber), text(readRange)),
   map: (source, key) =>
@@ -102,7 +103,7 @@ interface Measure {
 function bounded(value: number, typed: string, key: Key, measure: Measure): Outcome<number> {
   if (isWithin(value, key)) return { value };
   const bounds = boundsText(value, key, measure.unit);
-  return fault(typed, `${measure.name}${bounds}, such as ${key.example}`);
+  return fault(typed, `${measure.name}${bounds}, such as ${key.example}`, key.slip);
 }
 
 function readPlainNumber({ text: typed }: SourceText, key: Key): Outcome<number> {
@@ -159,17 +160,6 @@ function readLengthAtForce({ text: typed }: SourceText, key: Key): Outcome<numbe
     return { value: shear / displacement };
   }
   return fault(typed, wanted(key));
-}
-
-function readTemperatureOrTime(
-  source: SourceText,
-  key: Key,
-): Outcome<KindValues['temperature or time']> {
-  const match = /^at\s+(.*)$/.exec(source.text);
-  if (match === null) return quantity('temperature')(source, key);
-  const time = readIsoTime(match[1]);
-  if (time !== null) return { value: time };
-  return fault(source.text, 'a date and time that there is, such as at 2031-04-12T10:00');
 }
 
 /** C of N = C/S^m, such as `1.02e12 MPa^3`: any unit of stress or force, to the power m. */

@@ -4,7 +4,7 @@ import { type Findings, report } from './findings.ts';
 import { jointOf } from './joint.ts';
 import { RUN_KEYS } from './keys.ts';
 import { lookUp, uniqueIds } from './library.ts';
-import { lockInOf, lockInTime, structureOf } from './lock-in.ts';
+import { lockInOf, lockInTime, noteLockIn, structureOf } from './lock-in.ts';
 import { readKeys } from './read-keys.ts';
 import { rolesOf } from './run-fasteners.ts';
 import type { Clock, RunParts, RunValues } from './run-parts.ts';
@@ -57,6 +57,7 @@ function readRun(row: SourceMap, parts: RunParts, findings: Findings): Run | nul
     addedTension: values.added_tension,
     addedShear: values.added_shear,
   };
+  noteLockIn(run, row, values, findings);
   warnOfGap(run, time, parts.clock, findings);
   return run;
 }

@@ -11,6 +11,13 @@ export interface RangeValue {
   readonly of: Curve['of'];
 }
 
+/** Two temperatures that something lay between [°C], as the user wrote them. */
+export interface TemperatureRange {
+  readonly from: number;
+  readonly to: number;
+  readonly text: string;
+}
+
 /** A point of an S-N curve. */
 export interface PointValue {
   readonly cycles: number;
@@ -31,6 +38,7 @@ export interface KindValues extends QuantityValues {
   number: number;
   'whole number': number;
   lengths: readonly number[];
+  texts: readonly string[];
   text: string;
   id: string;
   name: string;
@@ -38,7 +46,7 @@ export interface KindValues extends QuantityValues {
   choice: string;
   'stiffness or rigid': number | 'rigid';
   'length at force': number;
-  'temperature or time': number | WrittenTime;
+  'temperature or time': number | WrittenTime | TemperatureRange;
   fixed: 'all' | 'middle' | 'first' | 'none' | readonly number[];
   points: readonly PointValue[];
   constant: ConstantValue;

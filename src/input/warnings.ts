@@ -6,6 +6,16 @@ export const WARNINGS = {
     `fastener ${fastener}: grip has no effect where free_play is 0; give the free play, or leave the grip out.`,
   thicknessUnknown: (member: string, curve: string) =>
     `member ${member}: curve ${curve} has a thickness factor and the member no thickness; the factor is taken as 1. Give the thickness.`,
+  unusual: (place: string, text: string, usual: string) =>
+    `${place}: ${text} is read as it stands, and ${usual} is usual; check the figure and its unit.`,
+  unlikelyInertia: (member: string, radius: string) =>
+    `member ${member}: area and inertia give a radius of gyration of ${radius}, which no section of this area has; check the units of both.`,
+  unlikelyTemperature: (zone: string, median: string) =>
+    `zone ${zone}: half of its temperatures lie on either side of ${median}; check whether its column is in another unit (°C, °F, K).`,
+  lockInAssumed: (run: string) =>
+    `run ${run}: lock_in is not given; the middle of 5 to 25 °C is taken. Give it, or screen with 5 and with 25 °C as well.`,
+  lockInFar: (run: string, lockIn: string, range: string) =>
+    `run ${run}: the lock-in temperature, ${lockIn}, is far from any in its zone, ${range}; check the units of both.`,
   lockInInGap: (run: string, zone: string) =>
     `run ${run}: at its lock-in time the record of zone ${zone} has a gap that does not count as covered; give the temperature itself.`,
   extremeUnused: (extreme: string) =>

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { readEpw } from '../../src/input/epw.ts';
-import type { Findings } from '../../src/input/findings.ts';
+import { noFindings } from '../../src/input/findings.ts';
 import { wordIssue } from '../../src/issue.ts';
 
 const HOUR = 3_600_000;
@@ -21,7 +21,7 @@ const row = (date: string, [air, global, direct, diffuse, wind]: readonly (numbe
 const VALUES = [5.5, 200, 350, 90, 3.1];
 
 const read = (lines: readonly string[], ends = '\n') => {
-  const findings: Findings = { issues: [], defaults: [], warnings: [] };
+  const findings = noFindings();
   const weather = readEpw(lines.join(ends), 'site.epw', findings);
   return { weather, messages: findings.issues.map(wordIssue) };
 };

@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest';
-import type { Findings } from '../../src/input/findings.ts';
+import { noFindings } from '../../src/input/findings.ts';
 import { KEY_TABLES, type Key } from '../../src/input/keys.ts';
 import { keysReference } from '../../src/input/keys-reference.ts';
 import { readValue } from '../../src/input/read-value.ts';
@@ -11,7 +11,7 @@ const ALL: readonly [string, Key][] = KEY_TABLES.flatMap(({ title, keys }) =>
 
 it.each(ALL)('%s reads its own example and default', (_, key) => {
   for (const text of [key.example, key.default].filter((given) => given !== undefined)) {
-    const findings: Findings = { issues: [], defaults: [], warnings: [] };
+    const findings = noFindings();
     const map = readYaml(`value: ${text}`, 'job.yaml', findings);
     const source = map?.entries.get('value')?.value;
     expect(source).toBeDefined();

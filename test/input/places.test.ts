@@ -1,10 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { readCsv } from '../../src/input/csv.ts';
-import type { Findings } from '../../src/input/findings.ts';
+import { noFindings } from '../../src/input/findings.ts';
 import type { Source, SourceMap } from '../../src/input/source.ts';
 import { readYaml } from '../../src/input/yaml.ts';
-
-const none = (): Findings => ({ issues: [], defaults: [], warnings: [] });
 
 /** What stands in the text at a place, as many characters as asked for. */
 function standsAt(text: string, source: Source, length: number): string {
@@ -25,7 +23,7 @@ function cell(map: SourceMap | undefined, key: string): Source {
 describe('places in CSV', () => {
   const text =
     'id,area [mm²],note,free\n\n "R1" , 450,"a, ""b""\nsecond line",é\n   \n,,,\n01,460,é,7\n';
-  const rows = readCsv(text, 'm.csv', none());
+  const rows = readCsv(text, 'm.csv', noFindings());
 
   it('are those of the first character of each cell', () => {
     expect(rows.length).toBe(2);
@@ -54,13 +52,13 @@ describe('places in CSV', () => {
   });
 
   it('are the same with the line ends of another system', () => {
-    const other = readCsv(text.replaceAll('\n', '\r\n'), 'm.csv', none());
+    const other = readCsv(text.replaceAll('\n', '\r\n'), 'm.csv', noFindings());
     expect(other).toEqual(rows);
   });
 
   it('name columns that stand twice, cells too many and quotes out of place', () => {
     const fault = (csv: string) => {
-      const findings = none();
+      const findings = noFindings();
       readCsv(csv, 'm.csv', findings);
       return findings.issues.map(({ place, found }) => `${place.line}:${place.column} ${found}`);
     };
@@ -82,7 +80,7 @@ describe('places in YAML', () => {
     '    grip:',
     "    line: '2'",
   ].join('\n');
-  const map = readYaml(text, 'job.yaml', none());
+  const map = readYaml(text, 'job.yaml', noFindings());
   const runs = map?.entries.get('runs')?.value;
   const [first, second] = runs?.type === 'list' ? (runs.items as SourceMap[]) : [];
 

@@ -1,15 +1,13 @@
 import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
-import type { Findings } from '../../src/input/findings.ts';
+import { noFindings } from '../../src/input/findings.ts';
 import { readRecord } from '../../src/input/record.ts';
 import { readYaml } from '../../src/input/yaml.ts';
 
-const none = (): Findings => ({ issues: [], defaults: [], warnings: [] });
-
 function read(text: string, columns: string | null = null) {
-  const findings = none();
-  const mapping = columns === null ? null : readYaml(columns, 'job.yaml', none());
+  const findings = noFindings();
+  const mapping = columns === null ? null : readYaml(columns, 'job.yaml', noFindings());
   const record = readRecord(text, 'r.csv', mapping, findings);
   return { record, findings };
 }

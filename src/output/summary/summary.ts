@@ -6,6 +6,7 @@ import { runFails } from '../run-fails.ts';
 import { exempt, failures, notGiven } from './check-groups.ts';
 import { damageTable } from './damage-table.ts';
 import { defaultLines } from './default-lines.ts';
+import { derivedLines } from './derived-lines.ts';
 import { CAUTION, notes, warnings } from './notes.ts';
 import { recordLines } from './record-lines.ts';
 import { runTable } from './run-table.ts';
@@ -30,6 +31,7 @@ export function summary(result: Result): string {
     section(`Damage in ${life} years (allowed ${allowed})`, [damageTable(result)]),
     section('To bear in mind', notes(result)),
     section('Warnings', warnings(result)),
+    section('Worked out from other values', derivedLines(job)),
     section('Left at their defaults', defaultLines(job.defaults)),
     [...recordLines(result), unitsLine(result), CAUTION].join('\n'),
   ];
