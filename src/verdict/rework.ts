@@ -39,7 +39,7 @@ const QUANTITIES: readonly Quantity[] = [
 /** A quantity is tried up to this many times and down to this share of what it is. */
 const FURTHEST = 20;
 /** Halvings of the factor: to within a thousandth. */
-const HALVINGS = 14;
+const HALVINGS = 12;
 
 /**
  * Where no remedy passes: the check that stays furthest above its limit, and for each single quantity of the run as it

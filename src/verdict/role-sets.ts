@@ -9,10 +9,25 @@ const ALL_SETS = 12;
  *
  * @param count fasteners
  * @param slots how many are slotted, 0 … count − 1
+ * @param symmetric whether of two arrangements that mirror each other one is enough
  */
-export function* roleSets(count: number, slots: number): Generator<Role[]> {
-  if (count > ALL_SETS) yield* blocks(count, slots);
-  else for (const fixed of subsets(count, count - slots)) yield rolesOf(count, fixed);
+export function* roleSets(count: number, slots: number, symmetric: boolean): Generator<Role[]> {
+  const sets = count > ALL_SETS ? blocks(count, slots) : anySets(count, slots);
+  for (const roles of sets) if (!symmetric || isFirstOfMirrored(roles)) yield roles;
+}
+
+/** Whether the roles, read from the left, come no later than read from the right. */
+function isFirstOfMirrored(roles: readonly Role[]): boolean {
+  const differs = roles.findIndex((role, i) => role !== roles[roles.length - 1 - i]);
+  return differs < 0 || roles[differs] === 'fixed';
+}
+
+function* anySets(count: number, slots: number): Generator<Role[]> {
+  for (const fixed of subsets(count, count - slots)) {
+    const roles = new Array<Role>(count).fill('slotted');
+    for (const i of fixed) roles[i] = 'fixed';
+    yield roles;
+  }
 }
 
 function* blocks(count: number, slots: number): Generator<Role[]> {
@@ -33,10 +48,4 @@ function* subsets(count: number, size: number, from = 0): Generator<number[]> {
   for (let i = from; i <= count - size; i++) {
     for (const rest of subsets(count, size - 1, i + 1)) yield [i, ...rest];
   }
-}
-
-function rolesOf(count: number, fixed: readonly number[]): Role[] {
-  const roles = new Array<Role>(count).fill('slotted');
-  for (const i of fixed) roles[i] = 'fixed';
-  return roles;
 }
