@@ -1,6 +1,7 @@
 #!/usr/bin/env node
 import { Command, CommanderError, Option } from 'commander';
 import type { CommandOutcome, ScreenOptions } from './commands/screen.ts';
+import type { SpacingsOptions } from './commands/spacings.ts';
 import { InputError, wordIssue } from './issue.ts';
 import { version } from './output/version.ts';
 
@@ -49,7 +50,47 @@ function commands(report: (outcome: CommandOutcome, strict: boolean) => void): C
       const { screenCommand } = await import('./commands/screen.ts');
       report(await screenCommand(job, options), options.strict ?? false);
     });
+  addSpacings(program, report);
   return program;
+}
+
+function addSpacings(
+  program: Command,
+  report: (outcome: CommandOutcome, strict: boolean) => void,
+): void {
+  program
+    .command('spacings')
+    .description(
+      'Compare spacings of the fasteners: every check at each, and the widest that passes.',
+    )
+    .argument('<job>', 'the job file, or a folder that holds job.yaml')
+    .option('--at <spacing...>', 'spacings to try, such as --at "300 mm" "600 mm"')
+    .option('--from <spacing>', 'the closest of evenly stepped spacings')
+    .option('--to <spacing>', 'the widest of them')
+    .option('--by <step>', 'the step between them')
+    .option('--runs <id...>', 'the runs to compare (default: all)')
+    .addOption(
+      new Option(
+        '--fixed <which...>',
+        "which fasteners are fixed (default: each run's own)",
+      ).choices(['all', 'first', 'middle', 'none']),
+    )
+    .option('--pieces <number...>', 'cut each run into so many pieces by expansion joints')
+    .option('--piece <length...>', 'cut each run into pieces no longer than this, joint to joint')
+    .option(
+      '--out <dir>',
+      "folder for the results (default: reports/, the job's name and -spacings)",
+    )
+    .addOption(
+      new Option('--charts <which>', 'charts of all runs, or none')
+        .choices(['all', 'none'])
+        .default('all'),
+    )
+    .option('--strict', 'exit with 1 if a run passes at none of the spacings')
+    .action(async (job: string, options: SpacingsOptions & { strict?: boolean }) => {
+      const { spacingsCommand } = await import('./commands/spacings.ts');
+      report(await spacingsCommand(job, options), options.strict ?? false);
+    });
 }
 
 /** Says on stderr what went wrong, and gives the exit code for it. */
