@@ -52,7 +52,13 @@ function settings(job: Job) {
     residue: counting.residue,
     force_gate_N: counting.forceGate,
     stress_gate_MPa: counting.stressGate,
+    extremes_cycle: counting.extremesCycle,
     represents_years: job.represents,
+    weather: job.weather,
+    warming: job.warming,
+    sunlit_zones: Object.fromEntries(
+      job.zones.flatMap(({ name, sunlit }) => (sunlit === null ? [] : [[name, sunlit.basis]])),
+    ),
     extremes: job.extremes.map(({ name, temperatures }) => ({
       name,
       degC: Object.fromEntries(temperatures),

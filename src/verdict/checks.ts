@@ -17,6 +17,8 @@ export interface ConnectionDemands {
   /** Miner sum a year; `null` without a curve. */
   readonly memberDamagePerYear: number | null;
   readonly fastenerDamagePerYear: number | null;
+  /** What the damage a year was scaled from, where the record is no whole year; else blank. */
+  readonly damageFrom: string;
   readonly shearRange: Demand;
   readonly shearPeak: Demand;
   readonly stressRange: Demand;
@@ -46,7 +48,7 @@ export function checksOf(
   limits: Limits,
 ): Check[] {
   const checks = [
-    damageCheck('member damage', demands.memberDamagePerYear, limits),
+    damageCheck('member damage', demands.memberDamagePerYear, demands, limits),
     fastenerDamageCheck(demands, fastener, limits),
     shearRangeCheck(demands, fastener),
     peakShearCheck(demands, fastener, limits),
@@ -65,8 +67,13 @@ export function governingCheck(checks: readonly Check[]): Check | null {
   return judged[firstLargest(judged.map(({ utilisation }) => utilisation ?? 0))];
 }
 
-function damageCheck(check: CheckName, perYear: number | null, limits: Limits): Check {
-  const demand = perYear === null ? null : { value: perYear * limits.designLife, when: '' };
+function damageCheck(
+  check: CheckName,
+  perYear: number | null,
+  { damageFrom: when }: ConnectionDemands,
+  limits: Limits,
+): Check {
+  const demand = perYear === null ? null : { value: perYear * limits.designLife, when };
   return compare(check, '1', demand, limits.damage);
 }
 
@@ -76,7 +83,7 @@ function fastenerDamageCheck(
   fastener: Fastener,
   limits: Limits,
 ): Check {
-  const check = damageCheck('fastener damage', demands.fastenerDamagePerYear, limits);
+  const check = damageCheck('fastener damage', demands.fastenerDamagePerYear, demands, limits);
   return isExempted(demands, fastener) ? { ...check, status: 'exempt' } : check;
 }
 

@@ -1,5 +1,6 @@
 import { minerDamage, type SeriesUse } from '../damage/miner.ts';
 import type { Connection, Damage, Demand, Spectrum } from '../model.ts';
+import { shortSeason } from '../temperature/short-season.ts';
 import { type ConnectionDemands, checksOf } from './checks.ts';
 import { withExtremesCycle } from './extremes-cycle.ts';
 import { judge } from './judge.ts';
@@ -78,8 +79,10 @@ function demandsOf(
   const drift = history.walks
     ? (Math.abs(history.drift[i]) / scene.years) * job.limits.designLife
     : 0;
+  const days = shortSeason(scene.coveredHours);
   return {
     ...damages,
+    damageFrom: days === null ? '' : `scaled from ${Math.round(days)} days`,
     role: run.roles[i],
     shearRange: {
       value: range > noise ? range / run.fasteners[i].perConnection : 0,

@@ -129,6 +129,7 @@ function axisPart(axis: RecordAxis, from: number, to: number): RecordAxis {
   return {
     times: axis.times.subarray(from, to),
     stepHours: axis.stepHours,
+    sampleHours: axis.sampleHours?.subarray(from, to) ?? null,
     filledHoursBefore: axis.filledHoursBefore.subarray(from, to),
   };
 }

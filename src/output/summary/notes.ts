@@ -1,10 +1,8 @@
 import type { Result } from '../../model.ts';
-import { amount } from '../names.ts';
+import { shortSeason } from '../../temperature/short-season.ts';
+import { amount, runNames } from '../names.ts';
 import { grouped, shortNumber } from '../number-text.ts';
 import { bullet, wrap } from './text-layout.ts';
-
-/** Under this many covered days a record is not called a whole year. */
-const WHOLE_YEAR_DAYS = 350;
 
 /** What the results leave out or assume, one entry a point. */
 export function notes(result: Result): string[] {
@@ -38,16 +36,36 @@ function walking({ job, runs }: Result): string[] {
 }
 
 function record({ job, runs }: Result): string[] {
-  const days = Math.min(...runs.map((run) => run.coveredHours)) / 24;
+  const days = shortSeason(Math.min(...runs.map((run) => run.coveredHours)));
   const part =
-    days < WHOLE_YEAR_DAYS
-      ? [`The record covers ${shortNumber(days)} days: the rest of the year is taken to be alike.`]
-      : [];
+    days === null
+      ? []
+      : [
+          `The record covers ${shortNumber(days)} days: damage a year and lives are scaled from them, and the rest of the year is taken to be alike.`,
+        ];
   const peaks =
     job.extremes.length === 0
       ? ['No extremes were given: peak forces and slips are those of this record alone.']
-      : [];
+      : extremesCycleLines({ job, runs });
   return [...part, ...peaks];
+}
+
+/** Whether the damage holds a cycle a year between the extremes; nothing to say where no run has two. */
+function extremesCycleLines({ job, runs }: Pick<Result, 'job' | 'runs'>): string[] {
+  if (!job.counting.extremesCycle) {
+    return [
+      'Extremes are for peaks and slips only. The damage holds no cycle between them: counting.extremes_cycle is off.',
+    ];
+  }
+  const pairs = new Map<string, string[]>();
+  for (const { run, extremesCycle: cycle } of runs) {
+    const text =
+      cycle === null
+        ? 'No cycle between extremes was added, since fewer than two concern'
+        : `One cycle a year between the extremes ${cycle.hot} and ${cycle.cold} is added to the damage of`;
+    pairs.set(text, [...(pairs.get(text) ?? []), run.id]);
+  }
+  return [...pairs].map(([text, ids]) => `${text} ${runNames(ids, runs.length)}.`);
 }
 
 function gated({ runs }: Result): string[] {

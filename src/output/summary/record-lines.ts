@@ -1,4 +1,4 @@
-import type { Result } from '../../model.ts';
+import type { Job, Result } from '../../model.ts';
 import { runNames, stamp } from '../names.ts';
 import { grouped, shortNumber } from '../number-text.ts';
 import { wrap } from './text-layout.ts';
@@ -15,9 +15,21 @@ export function recordLines({ job, runs }: Result): string[] {
   const years = groupedRuns(runs.map((run) => [run.run.id, yearsText(run.years)]));
   const passes = groupedRuns(runs.map((run) => [run.run.id, String(run.passes)]));
   return [
+    ...weatherLine(job),
     wrap(`${span} It covers ${covered} and stands for ${years}.`),
     wrap(`Passes through it until no slip changed: ${passes}.`),
   ];
+}
+
+/** The weather file that the record was read from. */
+function weatherLine({ weather }: Job): string[] {
+  if (weather === null) return [];
+  const { place, years, setOn } = weather;
+  const [first, last] = years;
+  const from = first === last ? `${first}` : `${first} to ${last}`;
+  const set =
+    setOn === null ? '' : ` It is a typical year of months from ${from}, set on ${setOn}.`;
+  return [wrap(`Weather file of ${place || 'a place without a name'}, ${from}.${set}`)];
 }
 
 function yearsText(years: number): string {

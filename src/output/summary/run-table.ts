@@ -1,5 +1,7 @@
-import type { Result, RunResult } from '../../model.ts';
+import type { Connection, Result, RunResult } from '../../model.ts';
+import { shortSeason } from '../../temperature/short-season.ts';
 import type { UnitSystem } from '../../units.ts';
+import { shortestLife } from '../life-text.ts';
 import { amount, connectionName } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
 import { runFails } from '../run-fails.ts';
@@ -35,14 +37,13 @@ function row(run: RunResult, units: UnitSystem): string[] {
   ];
 }
 
-/** More years than these say no more [years]. */
-const LONGEST_LIFE = 10_000;
+/** The shortest life, and the days that it was scaled from where the record is no whole year. */
+function life({ connections, coveredHours }: RunResult): string {
+  const days = shortSeason(coveredHours);
+  const scaled = days === null ? '' : `, from ${shortNumber(days)} days`;
+  return `${shortestLife(connections)}${connections.some(isLimited) ? scaled : ''}`;
+}
 
-function life(run: RunResult): string {
-  const lives = run.connections.map((c) => c.life).filter((years) => years !== null);
-  if (lives.length === 0) return 'no curve';
-  const shortest = Math.min(...lives);
-  if (!Number.isFinite(shortest)) return 'unlimited';
-  if (shortest > LONGEST_LIFE) return `over ${shortNumber(LONGEST_LIFE)} years`;
-  return `${shortNumber(shortest)} years`;
+function isLimited({ life }: Connection): boolean {
+  return life !== null && Number.isFinite(life);
 }

@@ -1,4 +1,5 @@
 import type { Result } from '../../model.ts';
+import { shortSeason } from '../../temperature/short-season.ts';
 import { connectionName } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
 import { unitOf } from '../quantity.ts';
@@ -10,7 +11,10 @@ import { derivedLines } from './derived-lines.ts';
 import { CAUTION, notes, warnings } from './notes.ts';
 import { recordLines } from './record-lines.ts';
 import { runTable } from './run-table.ts';
+import { sunLines } from './sun-lines.ts';
 import { wrap } from './text-layout.ts';
+import { warmingTable, warmingTitle } from './warming-table.ts';
+import { yearTable } from './year-table.ts';
 
 /**
  * The results for a person: the answer first, then each run, what failed, what was not given, damage,
@@ -28,7 +32,12 @@ export function summary(result: Result): string {
     section('What fails', failures(result)),
     section('Not given, so neither passed nor failed', notGiven(result)),
     section('Not owed, by the rule on the shear range', exempt(result)),
-    section(`Damage in ${life} years (allowed ${allowed})`, [damageTable(result)]),
+    section(`Damage in ${life} years (allowed ${allowed})${scaledText(result)}`, [
+      damageTable(result),
+    ]),
+    section('Year by year', yearTable(result)),
+    section(warmingTitle(job), warmingTable(result)),
+    section('Zones reckoned from sun and air', sunLines(job)),
     section('To bear in mind', notes(result)),
     section('Warnings', warnings(result)),
     section('Worked out from other values', derivedLines(job)),
@@ -54,6 +63,12 @@ function governs({ runs, governing }: Result): string {
   const check = connection.governing;
   if (check === null) return 'No limit was given for anything, so nothing was checked.';
   return `${connectionName(connection)} governs: ${check.check} is ${shortNumber(check.utilisation ?? 0)} times its limit.`;
+}
+
+/** The days that damage was scaled from where the record is no whole year. */
+function scaledText({ runs }: Result): string {
+  const days = shortSeason(Math.min(...runs.map(({ coveredHours }) => coveredHours)));
+  return days === null ? '' : `, scaled from ${shortNumber(days)} days`;
 }
 
 function unitsLine({ job: { units } }: Result): string {
