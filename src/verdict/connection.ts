@@ -53,7 +53,7 @@ export function assessConnection(
     shearPeak: shearPeakOf(scene, i).value,
     shearRange: demands.shearRange.value,
     fastenerDamage,
-    stressRange: demands.stressRange.value,
+    stressRange: span?.stressRange.value ?? 0,
     memberDamage,
     cyclesPerYear: fastenerDamage.cycles / years,
     fastenerDamagePerYear,
@@ -89,13 +89,20 @@ function demandsOf(
       when: rangeText(when, countedShear.maxMark[i], countedShear.minMark[i]),
     },
     shearPeak: unevenOr(scene, i, shearPeakOf(scene, i)),
-    stressRange: worseSpan(spans, i)?.stressRange ?? { value: 0, when: '' },
+    stressRange: largestStressRange(spans, i),
     slip: { value: history.slipPeak[i] + drift, when: when(history.slipPeakMark[i]) },
     compression: weakerSpan(spans, i)?.compression ?? null,
     settingTolerance: run.settingTolerance,
     addedTension: run.addedTension,
     addedShear: run.addedShear,
   };
+}
+
+/** The larger stress range of the two sides of connection i, whichever does more damage [MPa]. */
+function largestStressRange(spans: readonly SpanLoad[], i: number): Demand {
+  const none: Demand = { value: 0, when: '' };
+  const [left, right] = [spans[i - 1]?.stressRange ?? none, spans[i]?.stressRange ?? none];
+  return left.value >= right.value ? left : right;
 }
 
 /** Largest |f| of one fastener of connection i from lock-in on and at the extremes [N]. */
