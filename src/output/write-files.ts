@@ -2,6 +2,7 @@ import { randomBytes } from 'node:crypto';
 import { lstat, mkdir, readFile, rename, rm, rmdir, writeFile } from 'node:fs/promises';
 import { basename, join } from 'node:path';
 import { InputError, type Issue } from '../issue.ts';
+import { leftoverName, mendFolder } from './leftovers.ts';
 
 /** A file to write: a plain name without a folder, and its whole content. */
 export interface OutputFile {
@@ -12,28 +13,34 @@ export interface OutputFile {
 export const MANIFEST = 'manifest.json';
 
 /**
- * Writes all files and the manifest into a folder, or none. Everything is written under temporary names
- * first and then renamed, the manifest last. Files that the folder's old manifest lists are replaced, and
- * removed where they are not written again; any other file is left as it is.
+ * Writes all files and the manifest into a folder, or none. Everything is written under temporary names first. Then
+ * the old manifest is set aside, the files are renamed, and the new manifest is renamed last: a folder with a
+ * manifest holds a whole result at every moment, and what a killed run left behind is put right by the next one.
+ * Files that the folder's old manifest lists are replaced, and removed where they are not written again; any
+ * other file is left as it is.
  *
  * @param directory made where it does not exist
  * @param files plain names, none twice
- * @param manifest JSON text with `program` `daystrain` and `files` as a list of `{ name }`
+ * @param manifest JSON text with `program` `daystrain` and `files` as a list of `{ name, sha256 }`
+ * @param interrupted stops the writing where it is aborted before the end
  * @throws InputError where a file stands in the way that no manifest lists, or the folder cannot be
  *   written; the folder is then as it was
+ * @throws the signal's reason where interrupted; the folder is then as it was
  */
 export async function writeFiles(
   directory: string,
   files: readonly OutputFile[],
   manifest: string,
+  interrupted?: AbortSignal,
 ): Promise<void> {
   rejectBadNames(files);
+  await mend(directory);
   const ours = await readOldManifest(directory);
   await rejectStrangers(directory, files, ours);
   const all = [...files, { name: MANIFEST, content: manifest }];
   const stale = ours.filter((name) => !all.some((file) => file.name === name));
   try {
-    await replaceAll(directory, all, stale);
+    await replaceAll(directory, all, { stale, interrupted });
   } catch (error) {
     throw isFileError(error) ? cannotWrite(directory, error) : error;
   }
@@ -89,39 +96,57 @@ async function rejectStrangers(
   if (issues.length > 0) throw new InputError(issues);
 }
 
+interface Replacing {
+  /** Old files that are not written again. */
+  readonly stale: readonly string[];
+  readonly interrupted: AbortSignal | undefined;
+}
+
 /** Puts new files in place of old ones; undoes all of it where one step fails. */
 async function replaceAll(
   directory: string,
   files: readonly OutputFile[],
-  stale: readonly string[],
+  { stale, interrupted }: Replacing,
 ): Promise<void> {
-  const tag = `daystrain-${randomBytes(4).toString('hex')}`;
+  const tag = randomBytes(4).toString('hex');
   const at = (name: string) => join(directory, name);
-  const fresh = (name: string) => at(`${name}.${tag}.new.tmp`);
-  const kept = (name: string) => at(`${name}.${tag}.old.tmp`);
+  const fresh = (name: string) => at(leftoverName({ name, tag, kind: 'new' }));
+  const kept = (name: string) => at(leftoverName({ name, tag, kind: 'old' }));
   const made = await mkdir(directory, { recursive: true });
   const undo: (() => Promise<unknown>)[] = [
     () => (made === undefined ? Promise.resolve() : rmdir(directory)),
   ];
+  const step = (action: () => Promise<unknown>, back: () => Promise<unknown>) => {
+    interrupted?.throwIfAborted();
+    undo.push(back);
+    return action();
+  };
   try {
     for (const { name, content } of files) {
-      undo.push(() => rm(fresh(name), { force: true }));
-      await writeFile(fresh(name), content, { flag: 'wx' });
+      await step(
+        () => writeFile(fresh(name), content, { flag: 'wx' }),
+        () => rm(fresh(name), { force: true }),
+      );
     }
     const old: string[] = [];
-    for (const name of [...stale, ...files.map((file) => file.name)]) {
+    const names = files.map(({ name }) => name);
+    // Without its manifest the folder holds no result, until the new one is whole.
+    for (const name of [MANIFEST, ...stale, ...names.filter((one) => one !== MANIFEST)]) {
+      interrupted?.throwIfAborted();
       if (await moveIfThere(at(name), kept(name))) {
         old.push(name);
         undo.push(() => rename(kept(name), at(name)));
       }
-      if (stale.includes(name)) continue;
+      if (stale.includes(name) || name === MANIFEST) continue;
       await rename(fresh(name), at(name));
       undo.push(() => rename(at(name), fresh(name)));
     }
+    interrupted?.throwIfAborted();
+    await rename(fresh(MANIFEST), at(MANIFEST));
     // The new result stands: a leftover of the old one is no reason to report a failure.
     await Promise.allSettled(old.map((name) => rm(kept(name), { force: true })));
   } catch (error) {
-    for (const step of undo.reverse()) await step().catch(() => undefined);
+    for (const back of undo.reverse()) await back().catch(() => undefined);
     throw error;
   }
 }
@@ -133,6 +158,15 @@ async function moveIfThere(from: string, to: string): Promise<boolean> {
   } catch (error) {
     if (isFileError(error) && error.code === 'ENOENT') return false;
     throw error;
+  }
+}
+
+/** Puts right what a killed run left behind. */
+async function mend(directory: string): Promise<void> {
+  try {
+    await mendFolder(directory, MANIFEST);
+  } catch (error) {
+    throw isFileError(error) ? cannotWrite(directory, error) : error;
   }
 }
 
