@@ -407,6 +407,8 @@ export interface Job {
   readonly units: 'SI' | 'US';
   readonly axis: RecordAxis;
   readonly zones: readonly Zone[];
+  /** What judging the record found, in order of time. */
+  readonly recordFindings: readonly RecordFinding[];
   /** Years that the record stands for, where the job says so. */
   readonly represents: number | null;
   /** The weather file that the record was read from; `null` for a CSV. */

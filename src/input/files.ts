@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import { readFile } from 'node:fs/promises';
+import { open, readFile } from 'node:fs/promises';
 import { resolve } from 'node:path';
 import type { Place } from '../issue.ts';
 import type { InputFile } from '../model.ts';
@@ -13,9 +13,26 @@ export interface Files {
    * @param place where the user wrote it
    */
   read(name: string, place: Place, findings: Findings): Promise<string | null>;
+  /**
+   * Opens a file that may be too long for one text; `null` where it cannot be, which is reported.
+   * @param name as the user wrote it, relative to the job's folder
+   * @param place where the user wrote it
+   */
+  open(name: string, place: Place, findings: Findings): Promise<FileBytes | null>;
   /** Every file read so far, in order, each once. */
   readonly inputs: InputFile[];
 }
+
+/** The bytes of one file. */
+export interface FileBytes {
+  /** Size of the file [bytes]. */
+  readonly size: number;
+  /** The bytes from the start, block after block. May be gone through more than once. */
+  blocks(): AsyncIterable<Uint8Array>;
+}
+
+/** Bytes read at a time. */
+const BLOCK = 1 << 20;
 
 /** The files below, or named from, a folder. */
 export function filesOf(folder: string): Files {
@@ -32,7 +49,49 @@ export function filesOf(folder: string): Files {
       }
       return decode(bytes, name, findings);
     },
+    async open(name, place, findings) {
+      const path = resolve(folder, name);
+      const size = await sizeOf(path).catch((error: NodeJS.ErrnoException) =>
+        reportUnread(error, name, place, findings),
+      );
+      if (size === null) return null;
+      const input = { name, sha256: '' };
+      if (!inputs.some((input) => input.name === name)) inputs.push(input);
+      return { size, blocks: () => readBlocks(path, (sha256) => Object.assign(input, { sha256 })) };
+    },
   };
+}
+
+async function sizeOf(path: string): Promise<number> {
+  const file = await open(path);
+  try {
+    // Opening a folder succeeds; reading from it does not.
+    await file.read(new Uint8Array(1), 0, 1, 0);
+    return (await file.stat()).size;
+  } finally {
+    await file.close();
+  }
+}
+
+/** Reads a file to its end, and then tells its hash. */
+async function* readBlocks(
+  path: string,
+  tellHash: (sha256: string) => void,
+): AsyncGenerator<Uint8Array> {
+  const hash = createHash('sha256');
+  const file = await open(path);
+  try {
+    for (;;) {
+      const { buffer, bytesRead } = await file.read(new Uint8Array(BLOCK), 0, BLOCK);
+      if (bytesRead === 0) break;
+      const bytes = buffer.subarray(0, bytesRead);
+      hash.update(bytes);
+      yield bytes;
+    }
+    tellHash(hash.digest('hex'));
+  } finally {
+    await file.close();
+  }
 }
 
 function reportUnread(

@@ -38,7 +38,8 @@ function digits(text: string, from: number, to: number): number {
   return value;
 }
 
-function daysIn(year: number, month: number): number {
+/** Days in a month (1 … 12) of the Gregorian calendar. */
+export function daysIn(year: number, month: number): number {
   if (month === 2) return year % 4 === 0 && (year % 100 !== 0 || year % 400 === 0) ? 29 : 28;
   return month === 4 || month === 6 || month === 9 || month === 11 ? 30 : 31;
 }

@@ -60,7 +60,7 @@ async function readWhole(map: SourceMap, files: Files, findings: Findings): Prom
   const members = readMembers(await table(values.members), curves, findings);
   const fasteners = readFasteners(await table(values.fasteners), curves, findings);
 
-  const clock = basis && { axis: basis.axis, offset: basis.record.offset };
+  const clock = basis && { axis: basis.axis, offset: basis.record.offset, zone: basis.record.zone };
   const parts = { members, fasteners, zones, clock };
   const runs = readRuns(await table(values.runs), parts, findings);
   if (runs.length === 0 && findings.issues.length === 0) {
@@ -76,6 +76,7 @@ async function readWhole(map: SourceMap, files: Files, findings: Findings): Prom
     units: values.units,
     axis: basis.axis,
     zones: [...zones.items.values()],
+    recordFindings: basis.found,
     represents: basis.represents,
     weather: basis.weather,
     warming,

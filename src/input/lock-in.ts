@@ -28,12 +28,26 @@ export function lockInTime(
     const expected = 'a time without an offset, as the record has none';
     return report(findings, place, { found, expected });
   }
-  const time = lockIn.local - (lockIn.offset ?? clock.offset ?? 0) + (clock.offset ?? 0);
+  const time = timeOnClock(lockIn, clock);
+  if (time === null) {
+    const expected = `a time that the clock of ${clock.zone?.zone} shows once`;
+    const hint = 'Give it with its offset from UTC, such as at 2031-10-26T01:30+01:00.';
+    return report(findings, place, { found, expected, hint });
+  }
   const { times } = clock.axis;
   const [first, last] = [times[0], times[times.length - 1]];
   if (time >= first && time <= last) return time;
   const expected = `a time within the record, from ${written(first)} to ${written(last)}`;
   return report(findings, place, { found, expected });
+}
+
+/** A written time on the record's clock [ms]; `null` where the zone's clock shows it twice or never. */
+function timeOnClock({ local, offset }: WrittenTime, clock: Clock): number | null {
+  if (offset === null && clock.zone !== null) {
+    const { first, second, exists } = clock.zone.read(local);
+    return exists && first === second ? first : null;
+  }
+  return local - (offset ?? clock.offset ?? 0) + (clock.offset ?? 0);
 }
 
 function isTime(lockIn: KindValues['temperature or time']): lockIn is WrittenTime {

@@ -27,6 +27,15 @@ export function readLengths(source: Source, key: Key, read: Reader<number>): Out
   return { faults: [{ place, found: shown(items[falls]), expected: 'positions that rise' }] };
 }
 
+/** Reads texts, from a list or from one text. */
+export function readTexts(source: Source, key: Key): Outcome<string[]> {
+  if (source.type === 'text') return { value: [source.text] };
+  if (source.type === 'map' || source.items.length === 0) return wrongForm(source, wanted(key));
+  return readEach<string>(source.items, (item) =>
+    item.type === 'text' ? { value: item.text } : wrongForm(item, 'a text'),
+  );
+}
+
 /** Reads which fasteners are fixed: a word, or their numbers, each once. */
 export function readFixed(
   source: Source,

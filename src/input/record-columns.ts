@@ -1,10 +1,12 @@
 import type { Place } from '../issue.ts';
 import { converter, quantityOf } from '../units.ts';
+import { cellName } from './cell-name.ts';
 import { type Findings, report } from './findings.ts';
 import { readHeader } from './header.ts';
 import { COLUMN_KEYS } from './keys.ts';
 import { nearestName } from './nearest-name.ts';
 import { readKeys } from './read-keys.ts';
+import type { RecordLayout } from './record-layout.ts';
 import { placeOf, type SourceMap } from './source.ts';
 
 /** What a channel of the record may measure. */
@@ -13,7 +15,7 @@ export type ChannelQuantity = (typeof CHANNEL_QUANTITIES)[number];
 
 /** One column of the record that is read. */
 export interface RecordColumn {
-  /** The channel's name, or `time`. */
+  /** The channel's name, or `time` or `date`. */
   readonly name: string;
   /** Which cell of a row, from 0. */
   readonly index: number;
@@ -37,22 +39,25 @@ function measureOf(unit: string): Measure | null {
 }
 
 /**
- * Which columns of the record are the time and the channels. Without a mapping, that is `time` and every
- * other column, each with its unit in brackets; with one, what the mapping names.
+ * Which columns of the record are the time and the channels. Without a mapping, that is `time`, or `date` and
+ * `time`, and every other column, each with its unit in brackets; with one, what the mapping names.
  *
- * @returns the columns, the time first, or `null` where there is a fault, which is reported
+ * @param layout the header, and the line where it stands
+ * @returns the columns, date and time first, or `null` where there is a fault, which is reported
  */
 export function recordColumns(
-  headers: readonly string[],
+  layout: RecordLayout,
   file: string,
   mapping: SourceMap | null,
   findings: Findings,
 ): RecordColumn[] | null {
   const before = findings.issues.length;
+  const { headers, headerLine } = layout;
   const header = (index: number): Place => ({
     file,
-    line: 1,
+    line: Math.max(1, headerLine),
     column: headers.slice(0, index).join(',').length + (index === 0 ? 1 : 2),
+    cell: cellName(index, Math.max(1, headerLine)),
   });
   const columns =
     mapping === null
@@ -69,7 +74,9 @@ export function recordColumns(
     reportNoTime(headers, mapping?.place ?? header(0), findings);
   }
   if (findings.issues.length > before) return null;
-  return [...time, ...found.filter(({ measure }) => measure !== null)];
+  const date = time.filter(({ name }) => name === 'date');
+  const clock = time.filter(({ name }) => name === 'time');
+  return [...date, ...clock, ...found.filter(({ measure }) => measure !== null)];
 }
 
 function plainColumn(
@@ -79,7 +86,9 @@ function plainColumn(
   findings: Findings,
 ): RecordColumn | null {
   const { name, unit } = readHeader(text);
-  if (name === 'time') return { name, index, header: text, measure: null };
+  if (isTime(name)) return { name, index, header: text, measure: null };
+  // Lines that end in a separator leave a last column without a name.
+  if (text === '') return null;
   const measure = measureOf(unit ?? '');
   if (name !== '' && measure !== null) return { name, index, header: text, measure };
   return report(findings, place, {
@@ -96,9 +105,16 @@ function mappedColumns(
   findings: Findings,
 ): (RecordColumn | null)[] {
   return [...mapping.entries].map(([header, { place }]) => {
-    const index = headers.indexOf(header);
-    if (headers.lastIndexOf(header) > index) {
-      return report(findings, place, { found: header, expected: 'a header that stands once' });
+    const named = headers.indexOf(header);
+    // A column whose header is blank or stands twice may be named by its number.
+    const isNumber = named < 0 && /^[1-9]\d{0,3}$/.test(header) && Number(header) <= headers.length;
+    const index = isNumber ? Number(header) - 1 : named;
+    if (!isNumber && headers.lastIndexOf(header) > index) {
+      return report(findings, place, {
+        found: header,
+        expected: 'a header that stands once',
+        hint: `Name the column by its number from the left instead: ${index + 1}.`,
+      });
     }
     if (index >= 0) return mappedColumn(header, index, mapping, findings);
     const nearest = nearestName(header, headers);
@@ -117,11 +133,11 @@ function mappedColumn(
   findings: Findings,
 ): RecordColumn | null {
   const value = mapping.entries.get(header)?.value;
-  if (value?.type === 'text' && value.text === 'time') {
-    return { name: 'time', index, header, measure: null };
+  if (value?.type === 'text' && isTime(value.text)) {
+    return { name: value.text, index, header, measure: null };
   }
   if (value?.type !== 'map') {
-    const expected = 'time, or a mapping such as { channel: air, unit: degC }';
+    const expected = 'time, date, or a mapping such as { channel: air, unit: degC }';
     return report(findings, placeOf(mapping, header), {
       ...(value?.type === 'text' && value.text !== '' ? { found: value.text } : {}),
       expected,
@@ -136,13 +152,15 @@ function mappedColumn(
   return report(findings, placeOf(value, 'unit'), { ...found, expected });
 }
 
+/** A header or a mapping's word for the time; of a time in two columns, `date` is the day and `time` the clock. */
+function isTime(name: string): boolean {
+  return name === 'time' || name === 'date';
+}
+
 function reportNoTime(headers: readonly string[], place: Place, findings: Findings): void {
-  const one = headers.length === 1 && /[;\t]/.test(headers[0]);
   report(findings, place, {
     found: headers.join(','),
     expected: 'a column time',
-    hint: one
-      ? 'Cells are separated by commas.'
-      : 'For a file with headers of its own, name its columns under record.columns.',
+    hint: 'For a file with headers of its own, name its columns under record.columns.',
   });
 }

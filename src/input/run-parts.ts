@@ -2,6 +2,7 @@ import type { Fastener, Member, RecordAxis, Zone } from '../model.ts';
 import type { RUN_KEYS } from './keys.ts';
 import type { Library } from './library.ts';
 import type { Values } from './values.ts';
+import type { ZoneClock } from './zone-clock.ts';
 
 /** What a run is put together from. */
 export interface RunParts {
@@ -16,6 +17,8 @@ export interface RunParts {
 export interface Clock {
   readonly axis: RecordAxis;
   readonly offset: number | null;
+  /** The clock that the record was written by, where the job names its zone. */
+  readonly zone: ZoneClock | null;
 }
 
 /** The keys of one run, read. */

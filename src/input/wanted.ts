@@ -16,6 +16,7 @@ const WANTED: Record<WordedKind, string> = {
   'whole number': 'a whole number',
   lengths: 'a list of lengths with their units',
   text: 'a text',
+  texts: 'a list of texts',
   id: 'a name that may stand in the name of a file',
   name: 'a name',
   'yes or no': 'yes or no',

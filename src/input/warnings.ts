@@ -20,4 +20,20 @@ export const WARNINGS = {
     `run ${run}: at its lock-in time the record of zone ${zone} has a gap that does not count as covered; give the temperature itself.`,
   extremeUnused: (extreme: string) =>
     `extreme ${extreme}: no run's member is in a zone that it names, so it does nothing; name such a zone.`,
+  stuck: (count: number) =>
+    `record: ${times(count)} a temperature stands unchanged for longer than record.stuck allows; see record.csv, and say in record.stuck whether such stretches are kept or left out.`,
+  spikes: (count: number) =>
+    `record: ${times(count)} a temperature leaves its neighbours faster than record.spikes allows and comes back; see record.csv, and say in record.spikes whether such values are kept or left out.`,
+  jumps: (count: number) =>
+    `record: ${times(count)} a temperature jumps faster than record.jumps allows and does not come back; see record.csv whether a sensor was moved or changed there.`,
+  channelsApart: (count: number) =>
+    `record: ${count === 1 ? 'a channel lies' : `${count} channels lie`} far from the first one; see record.csv, and whether its unit is right.`,
+  doubledHourOnce: (count: number) =>
+    `record: ${times(count)} an hour that the clock showed twice stands in it once and is taken as the first; see whether the logger keeps summer time.`,
+  coarseStep: (hours: number) =>
+    `record: its step of ${Number(hours.toPrecision(3))} h misses the top and the bottom of a day, so that ranges are too small; use an hourly record.`,
 } as const;
+
+function times(count: number): string {
+  return count === 1 ? 'once' : `${count} times`;
+}

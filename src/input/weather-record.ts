@@ -38,6 +38,8 @@ export function readWeatherRecord(
       ['wind', 'speed'],
     ]),
     offset: site.utcOffset * HOUR,
+    zone: null,
+    fileStarts: [],
     site,
     weather: { place: name, years, setOn },
   };

@@ -55,6 +55,7 @@ export function makeResult(recipe: ResultRecipe = {}): Result {
     units: recipe.units ?? 'SI',
     axis,
     zones,
+    recordFindings: [],
     represents: null,
     weather: null,
     warming: null,
@@ -99,6 +100,7 @@ function makeAxis(hours: number): RecordAxis {
   return {
     times: Float64Array.from({ length: hours }, (_, i) => start + i * 3_600_000),
     stepHours: 1,
+    sampleHours: null,
     filledHoursBefore: new Float64Array(hours),
   };
 }

@@ -7,7 +7,7 @@ const HOUR = 3_600_000;
 /** Samples a given time apart, from a moment on [ms, h]. */
 export function axisOf(start: number, count: number, stepHours = 1): RecordAxis {
   const times = new Float64Array(count).map((_, i) => start + i * stepHours * HOUR);
-  return { times, stepHours, filledHoursBefore: new Float64Array(count) };
+  return { times, stepHours, sampleHours: null, filledHoursBefore: new Float64Array(count) };
 }
 
 /**
