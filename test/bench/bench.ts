@@ -1,8 +1,12 @@
 import { chainBench } from './chain.bench-part.ts';
+import { countingBench } from './counting.bench-part.ts';
 import type { BenchRow } from './in-turns.ts';
+import { jobsBench } from './jobs.bench-part.ts';
 
 const parts: readonly (readonly [string, () => BenchRow[]])[] = [
-  ['chain, against 8,760 bare tridiagonal solves', chainBench],
+  ['Counting and damage, against summing the same array', countingBench],
+  ['Chain, against 8,760 bare tridiagonal solves', chainBench],
+  ['Whole jobs, against node -e 0', jobsBench],
 ];
 
 for (const [title, part] of parts) {

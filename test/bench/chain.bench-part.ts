@@ -89,10 +89,10 @@ function countedYear(chain: Chain, count: number, { strain, turns }: StrainPath)
   if (typeof curve === 'string') throw new Error(curve);
   const table = createDamageTables().of(curve, 1.35, null);
   const counters = createPassCounters(count, 1);
-  const sink = new RowSink(count, ({ values, rows, capacity }) => {
+  const sink = new RowSink(count, ({ values, rows, capacity, marks }) => {
     spans ??= new Float64Array(capacity * (count - 1));
     spanForces(values, spans, count, rows);
-    counters.take(values, spans, rows);
+    counters.take(values, spans, rows, marks);
   });
   let spans: Float64Array | undefined;
   return () => {
