@@ -56,7 +56,7 @@ export function inventedWeather(place: Place): Season {
 }
 
 /** How clear the sky is at each hour, 0 … 1: spells of some days, more clear than not, broken by the hour. */
-function inventedClearness({ seed, hours }: Place): number[] {
+export function inventedClearness({ seed, hours }: Place): number[] {
   const normal = seededNormal(seed);
   const days = spells(normal, hours / 24 + 2, 0.55);
   return Array.from({ length: hours }, (_, h) => {
@@ -72,7 +72,11 @@ function inventedCalm({ seed, hours }: Place): number[] {
 }
 
 /** Air at each hour [K] but for an affine stretch: season, spells of weather, and a day that peaks at 15:00. */
-function inventedAir({ seed, hours }: Place, times: readonly number[], clear: number[]): number[] {
+export function inventedAir(
+  { seed, hours }: Place,
+  times: readonly number[],
+  clear: number[],
+): number[] {
   const normal = seededNormal(seed + 1);
   const days = spells(normal, hours / 24 + 2, 0.75);
   return times.map((time, h) => {
@@ -114,7 +118,7 @@ function sunOn({ azimuth }: Side, time: number, latitude: number): number {
 }
 
 /** Daily values that keep a share of the day before. */
-function spells(normal: () => number, days: number, kept: number): number[] {
+export function spells(normal: () => number, days: number, kept: number): number[] {
   let value = normal();
   const fresh = Math.sqrt(1 - kept ** 2);
   return Array.from({ length: Math.ceil(days) }, () => {
@@ -124,7 +128,7 @@ function spells(normal: () => number, days: number, kept: number): number[] {
 }
 
 /** A daily value at a share of days, on the straight line between its neighbours. */
-function between(days: readonly number[], at: number): number {
+export function between(days: readonly number[], at: number): number {
   const day = Math.floor(at);
   return days[day] + (at - day) * (days[day + 1] - days[day]);
 }
@@ -139,7 +143,10 @@ function follow(values: readonly number[], share: number): number[] {
 }
 
 /** The values stretched and shifted to the range. */
-function stretch(values: readonly number[], [low, high]: readonly [number, number]): number[] {
+export function stretch(
+  values: readonly number[],
+  [low, high]: readonly [number, number],
+): number[] {
   const least = Math.min(...values);
   const scale = (high - low) / (Math.max(...values) - least);
   return values.map((v) => low + scale * (v - least));

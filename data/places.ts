@@ -40,3 +40,19 @@ export const PLACES: readonly { folder: string; place: Place; form: RecordForm }
     form: { unit: 'degF', outages: [] },
   },
 ];
+
+/** The invented weather station of an example, and where its sun stands. */
+export const STATION = {
+  folder: 'larch-yard',
+  name: 'Larch Yard',
+  site: { latitude: 47.2, longitude: 9.4, utcOffset: 1 },
+  place: {
+    seed: 47,
+    start: Date.UTC(2031, 0, 1, 1),
+    hours: 365 * 24,
+    latitude: 47.2,
+    air: [-14, 33],
+    sides: [],
+    structure: null,
+  },
+} as const satisfies { place: Place; [key: string]: unknown };

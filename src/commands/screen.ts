@@ -7,10 +7,13 @@ import { manifestJson } from '../output/manifest-json.ts';
 import { resultsCsv } from '../output/results-csv.ts';
 import { runFails } from '../output/run-fails.ts';
 import { summary } from '../output/summary/summary.ts';
-import { MANIFEST, type OutputFile, writeFiles } from '../output/write-files.ts';
+import { warmingCsv } from '../output/warming-csv.ts';
+import { MANIFEST, type OutputFile } from '../output/write-files.ts';
+import { yearsCsv } from '../output/years-csv.ts';
 import { screen } from '../verdict/screen.ts';
 import { filesText } from './files-text.ts';
 import { reportDirectory } from './report-directory.ts';
+import { writeResults } from './write-results.ts';
 
 export interface ScreenOptions {
   /** Folder for the results; by default one under `reports/` with the job's name. */
@@ -59,10 +62,17 @@ async function write(
     { name: 'results.csv', content: resultsCsv(result) },
     { name: 'checks.csv', content: checksCsv(result) },
     { name: 'cycles.csv', content: cyclesCsv(result) },
+    ...present('years.csv', yearsCsv(result)),
+    ...present('warming.csv', warmingCsv(result)),
     ...(await drawCharts(result, charts)),
   ];
-  await writeFiles(directory, files, manifestJson(result, files));
+  await writeResults(directory, files, manifestJson(result, files));
   return [...files.map((file) => file.name), MANIFEST];
+}
+
+/** A file that some jobs have no use for. */
+function present(name: string, content: string | null): OutputFile[] {
+  return content === null ? [] : [{ name, content }];
 }
 
 /** The canvas is loaded only where charts are wanted. */

@@ -1,5 +1,6 @@
 import { stringify } from 'csv-stringify/sync';
 import type { Connection, Result, RunResult } from '../model.ts';
+import { shortSeason } from '../temperature/short-season.ts';
 import { cellNumber } from './number-text.ts';
 import { inUnits, unitOf, type Written } from './quantity.ts';
 
@@ -65,4 +66,6 @@ const COLUMNS: readonly Column[] = [
   { name: 'passes', value: (_, run) => run.passes },
   { name: 'verdict', value: (c) => c.verdict },
   { name: 'remedy', value: (c) => c.remedy },
+  // blank where the record is a whole year
+  { name: 'damage_scaled_from [days]', value: (_, run) => shortSeason(run.coveredHours) },
 ];

@@ -25,7 +25,7 @@ test('results.csv has the agreed columns, with the units of the job', () => {
       'shear_range_equivalent [kN],cycles_per_year,fastener_damage_per_year,' +
       'stress_range_max [MPa],stress_range_equivalent [MPa],member_damage_per_year,life [years],' +
       'slip_peak [mm],sliding_per_year [mm],buckling_utilisation,governing_check,utilisation,' +
-      'passes,verdict,remedy',
+      'passes,verdict,remedy,damage_scaled_from [days]',
   );
   expect(headerOf(resultsCsv(us))).toBe(
     headerOf(resultsCsv(si))
@@ -49,6 +49,13 @@ test('results.csv has one row a connection with the numbers of the result', () =
     expect(row.governing_check).toBe(connection.governing?.check);
     expect(row.verdict).toBe(connection.verdict);
   }
+});
+
+test('results.csv names the days that damage was scaled from where the record is no whole year', () => {
+  const days = (result: typeof si) =>
+    rowsOf(resultsCsv(result)).map((row) => row['damage_scaled_from [days]']);
+  expect(new Set(days(si))).toEqual(new Set(['']));
+  expect(new Set(days(makeResult({ hours: 90 * 24 })))).toEqual(new Set(['90']));
 });
 
 test('US results are the SI ones by the exact inch and pound-force', () => {

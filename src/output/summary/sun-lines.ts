@@ -1,50 +1,72 @@
-import type { Job, LightBasis, Site, SunlitBasis } from '../../model.ts';
+import type { Job, LightBasis, Site, Stamp, SunlitBasis } from '../../model.ts';
 import { timeConstant } from '../../temperature/thermal-lag.ts';
 import type { UnitSystem } from '../../units.ts';
 import { amount } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
 import { bullet } from './text-layout.ts';
 
-/** What each zone in the sun was reckoned from, one point a zone. */
+/**
+ * What the zones in the sun were reckoned from: first what they share, then what each has of its own.
+ */
 export function sunLines({ zones, units }: Job): string[] {
-  return zones.flatMap(({ name, sunlit }) =>
-    sunlit === null ? [] : [bullet(`${name}: ${basisText(sunlit.basis, units)}`)],
+  const sunlit = zones.flatMap(({ name, sunlit }) =>
+    sunlit === null ? [] : [{ name, parts: partsOf(sunlit.basis, units) }],
   );
+  if (sunlit.length === 0) return [];
+  const [first] = sunlit;
+  const isShared = (part: string) =>
+    sunlit.length > 1 && sunlit.every(({ parts }) => parts.includes(part));
+  const shared = first.parts.filter(isShared);
+  const lines = sunlit.map(({ name, parts }) => {
+    const own = parts.filter((part) => !isShared(part));
+    return `${name}: ${own.length === 0 ? 'nothing else' : own.join('; ')}.`;
+  });
+  const all = shared.length === 0 ? [] : [`All of them: ${shared.join('; ')}.`];
+  return [...all, ...lines].map(bullet);
 }
 
-function basisText(basis: SunlitBasis, units: UnitSystem): string {
-  const { surface, absorptance, emissivity, skyLoss, tilt } = basis;
+function partsOf(basis: SunlitBasis, units: UnitSystem): string[] {
+  const { surface, absorptance, emissivity, skyLoss } = basis;
   const named = surface === null ? '' : ` (${surface})`;
-  const parts = [
-    `air from ${basis.air}`,
-    lightText(basis.light, tilt, units),
+  return [
+    `air temperature from ${basis.air}`,
+    ...lightParts(basis, units),
     `absorptance ${shortNumber(absorptance)}${named}`,
-    `emissivity ${shortNumber(emissivity)} and sky loss ${amount(skyLoss, 'irradiance', units)}`,
+    `emissivity ${shortNumber(emissivity)}, sky loss ${amount(skyLoss, 'irradiance', units)}`,
     filmText(basis, units),
     lagText(basis, units),
   ];
-  return `${parts.join('; ')}.`;
 }
 
-function lightText(light: LightBasis, tilt: number, units: UnitSystem): string {
-  if (light.from === 'surface') return `sun measured on the surface, ${light.channel}`;
-  const { global, direct, diffuse, site, faces, albedo, sky, overhang, horizon } = light;
+function lightParts({ light, tilt }: SunlitBasis, units: UnitSystem): string[] {
+  if (light.from === 'surface') return [`sun measured on the surface, ${light.channel}`];
+  const { global, direct, diffuse, site, stamp, faces, albedo, sky } = light;
   const given = [global, direct, diffuse].filter((channel) => channel !== null);
   const split = given.length === 1 ? ', parted into direct and diffuse by Erbs' : '';
-  const shade = [
-    ...(overhang === null
-      ? []
-      : [
-          `under an overhang ${amount(overhang.depth, 'length', units)} deep and ${amount(overhang.above, 'length', units)} above`,
-        ]),
-    ...(horizon.length === 0 ? [] : ['behind a horizon']),
-  ];
+  const turned = tilt === 0 ? 'level' : `facing ${shortNumber(faces)}°, tilt ${shortNumber(tilt)}°`;
   return [
-    `sun from ${given.join(', ')}${split}, at ${placeText(site)}`,
-    `on a surface that faces ${shortNumber(faces)}°, tilt ${shortNumber(tilt)}°`,
-    ...shade,
+    `sun from ${given.join(', ')}${split}, at ${placeText(site)}, ${STAMP_TEXT[stamp]}`,
+    `surface ${turned}${shadeText(light, units)}`,
     `${sky} sky, ground ${shortNumber(albedo)}`,
-  ].join(', ');
+  ];
+}
+
+const STAMP_TEXT: Readonly<Record<Stamp, string>> = {
+  end: 'means of the step that ends at each time',
+  start: 'means of the step that starts at each time',
+  instant: 'values of the moment',
+};
+
+function shadeText(
+  { overhang, horizon }: Extract<LightBasis, { from: 'sky' }>,
+  units: UnitSystem,
+): string {
+  const length = (value: number) => amount(value, 'length', units);
+  const over =
+    overhang === null
+      ? ''
+      : `, under an overhang ${length(overhang.depth)} deep and ${length(overhang.above)} above`;
+  return `${over}${horizon.length === 0 ? '' : ', behind a horizon'}`;
 }
 
 function placeText({ latitude, longitude, utcOffset }: Site): string {
