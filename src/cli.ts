@@ -2,13 +2,16 @@
 import { Command, CommanderError, Option } from 'commander';
 import type { CommandOutcome, ScreenOptions } from './commands/screen.ts';
 import type { SpacingsOptions } from './commands/spacings.ts';
-import { InputError, wordIssue } from './issue.ts';
+import { Interrupted } from './commands/write-results.ts';
+import { InputError, wordIssues } from './issue.ts';
 import { version } from './output/version.ts';
 
 const OK = 0;
 const A_CHECK_FAILS = 1;
 const BAD_INPUT = 2;
 const UNEXPECTED = 3;
+/** What shells report of a program that an interrupt ended. */
+const INTERRUPTED = 130;
 
 process.exitCode = await main(process.argv);
 
@@ -19,11 +22,18 @@ async function main(argv: readonly string[]): Promise<number> {
     for (const line of lines) console.log(line);
     if (strict && fails) code = A_CHECK_FAILS;
   });
+  let allErrors = false;
+  for (const command of program.commands) {
+    command.option('--all-errors', 'tell every error in the input, not the first ten');
+  }
+  program.hook('preAction', (_, command) => {
+    allErrors = command.opts().allErrors ?? false;
+  });
   try {
     await program.parseAsync(argv);
     return code;
   } catch (error) {
-    return explain(error);
+    return explain(error, allErrors);
   }
 }
 
@@ -32,6 +42,22 @@ function commands(report: (outcome: CommandOutcome, strict: boolean) => void): C
     .description('Screens thermally cycled fastened connections for fatigue.')
     .version(version)
     .exitOverride();
+  program
+    .command('start')
+    .description('Write a commented job with an invented record, ready to be screened.')
+    .argument('<dir>', 'the folder for it')
+    .action(async (directory: string) => {
+      const { startCommand } = await import('./commands/start.ts');
+      report(await startCommand(directory), false);
+    });
+  program
+    .command('check')
+    .description('Read a job and say in words what was understood; nothing is written.')
+    .argument('<job>', 'the job file, or a folder that holds job.yaml')
+    .action(async (job: string) => {
+      const { checkCommand } = await import('./commands/check.ts');
+      report(await checkCommand(job), false);
+    });
   program
     .command('screen')
     .description('Screen every connection of a job and write tables, charts and a summary.')
@@ -94,14 +120,18 @@ function addSpacings(
 }
 
 /** Says on stderr what went wrong, and gives the exit code for it. */
-function explain(error: unknown): number {
+function explain(error: unknown, allErrors: boolean): number {
   // The option parser has already printed its own message, help or version.
   if (error instanceof CommanderError) return error.exitCode === 0 ? OK : BAD_INPUT;
   if (error instanceof InputError) {
-    for (const issue of error.issues) console.error(wordIssue(issue));
+    for (const line of wordIssues(error.issues, allErrors)) console.error(line);
     const count = error.issues.length;
     console.error(`${count === 1 ? '1 error' : `${count} errors`}. Nothing was written.`);
     return BAD_INPUT;
+  }
+  if (error instanceof Interrupted) {
+    console.error(error.message);
+    return INTERRUPTED;
   }
   const message = error instanceof Error ? error.message : String(error);
   console.error(`daystrain failed unexpectedly (${message}). Please report this as a fault.`);

@@ -3,12 +3,13 @@ import { InputError } from '../issue.ts';
 import { manifestText } from '../output/manifest-json.ts';
 import { spacingsCsv } from '../output/spacings-csv.ts';
 import { notComparedText, spacingsText } from '../output/spacings-text.ts';
-import { MANIFEST, type OutputFile, writeFiles } from '../output/write-files.ts';
+import { MANIFEST, type OutputFile } from '../output/write-files.ts';
 import { compareSpacings, type SpacingComparison } from '../verdict/spacings.ts';
 import { filesText } from './files-text.ts';
 import { reportDirectory } from './report-directory.ts';
 import type { CommandOutcome } from './screen.ts';
 import { chooseRuns, readSpacings, type SpacingOptions } from './spacing-options.ts';
+import { writeResults } from './write-results.ts';
 
 export interface SpacingsOptions extends SpacingOptions {
   /** Folder for the results; by default one under `reports/` with the job's name and `-spacings`. */
@@ -61,7 +62,7 @@ async function write(
     { name: 'spacings.csv', content: spacingsCsv(comparison) },
     ...(charts === 'none' ? [] : await drawCharts(comparison)),
   ];
-  await writeFiles(
+  await writeResults(
     directory,
     files,
     manifestText(comparison.job, { spacings: made(comparison) }, files),
