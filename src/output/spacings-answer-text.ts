@@ -20,14 +20,6 @@ export function answerText({ rows, answer }: SpacingCase, units: UnitSystem): st
   return `${verdict} ${help}`.trimEnd();
 }
 
-/** What more fasteners do, in a word for a table. */
-export function helpWord(help: FastenerHelp | null): string {
-  if (help === null) return '';
-  return { worse: 'make it worse', none: 'do not help', little: 'help little', much: 'help' }[
-    help.effect
-  ];
-}
-
 function passing(
   widest: SpacingRow,
   { stop, failingBelow }: SpacingCase['answer'],
@@ -65,9 +57,16 @@ function alone(rows: readonly SpacingRow[]): string {
   return one ? 'One number of fasteners was tried, so none can be compared.' : '';
 }
 
+const HELP: Record<FastenerHelp['effect'], string> = {
+  worse: 'make it worse',
+  none: 'do not help',
+  little: 'help little',
+  much: 'help',
+};
+
 function helpText(help: FastenerHelp, units: UnitSystem): string {
   const { check, few, fewUse, many, manyUse } = help;
   const closer = `from ${few.count} to ${many.count} of them (${lengthText(few.spacing, units)} to ${lengthText(many.spacing, units)})`;
   const change = `${check} goes from ${shortNumber(fewUse)} to ${useText(manyUse)}`;
-  return `More fasteners ${helpWord(help)}: ${closer} ${change}. ${reasonText(help, units)}`;
+  return `More fasteners ${HELP[help.effect]}: ${closer} ${change}. ${reasonText(help, units)}`;
 }

@@ -1,11 +1,11 @@
 import { CHECKS, type CheckName } from '../model.ts';
+import type { FastenerHelp } from '../verdict/fastener-help.ts';
 import type { SpacingRow } from '../verdict/spacing-row.ts';
 import type { NotCompared, SpacingCase, SpacingComparison } from '../verdict/spacings.ts';
 import { runNames } from './names.ts';
-import { shortNumber } from './number-text.ts';
-import { answerText, helpWord } from './spacings-answer-text.ts';
+import { answerText } from './spacings-answer-text.ts';
 import { spacingsNotes } from './spacings-notes.ts';
-import { caseText, cutText, lengthText } from './spacings-words.ts';
+import { caseText, cutText, lengthText, useNumber } from './spacings-words.ts';
 import { CAUTION } from './summary/notes.ts';
 import { bullet, table, wrap } from './summary/text-layout.ts';
 
@@ -82,12 +82,11 @@ function answerTable({ cases, job: { units } }: SpacingComparison): string {
     'run',
     'fixed',
     'pieces',
-    'widest that passes',
-    'count',
+    'widest passing',
     'stopped by',
     'utilisation',
     'at',
-    'more fasteners',
+    'closer helps',
   ];
   const rows = cases.map(({ run, arrangement, cut, answer }) => {
     const { widest, stop, nearest } = answer;
@@ -98,15 +97,21 @@ function answerTable({ cases, job: { units } }: SpacingComparison): string {
       arrangement,
       'longest' in cut ? `≤ ${lengthText(cut.longest, units)}` : String(cut.pieces),
       widest !== null ? lengthText(widest.spacing, units) : nearest !== null ? 'none' : '',
-      widest === null ? '' : String(widest.count),
       check?.check ?? (widest === null ? 'nothing to check' : 'nothing tried'),
-      check === undefined ? '' : shortNumber(check.utilisation ?? 0),
+      check === undefined ? '' : useNumber(check.utilisation ?? 0),
       failing === null ? '' : lengthText(failing.spacing, units),
-      helpWord(answer.help),
+      answer.help === null ? '' : CLOSER_HELPS[answer.help.effect],
     ];
   });
-  return table([header, ...rows], [2, 3, 4, 6, 7]);
+  return table([header, ...rows], [2, 3, 5, 6]);
 }
+
+const CLOSER_HELPS: Record<FastenerHelp['effect'], string> = {
+  worse: 'no, worse',
+  none: 'no',
+  little: 'little',
+  much: 'yes',
+};
 
 /** For each check, the runs that it stands open in at some spacing. */
 function byCheck(

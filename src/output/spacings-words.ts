@@ -36,9 +36,13 @@ export function cutText(cut: Cut, units: UnitSystem): string {
   return cut.pieces === 1 ? '' : `in ${cut.pieces} pieces`;
 }
 
-/** How far a limit is used, with the digits that tell a failing one from 1: `1.32 times its limit`. */
+/** How far a limit is used: `1.32 times its limit`. */
 export function useText(utilisation: number): string {
+  return `${useNumber(utilisation)} times its limit`;
+}
+
+/** A utilisation with the digits that tell a failing one from 1. */
+export function useNumber(utilisation: number): string {
   const short = shortNumber(utilisation);
-  const over = utilisation > 1 && short === '1';
-  return `${over ? String(Number(utilisation.toPrecision(5))) : short} times its limit`;
+  return utilisation > 1 && short === '1' ? String(Number(utilisation.toPrecision(5))) : short;
 }
