@@ -2,6 +2,7 @@ import type { Job, RunResult } from '../../model.ts';
 import { connectionName } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
 import { unitOf } from '../quantity.ts';
+import { connectionFails } from '../run-fails.ts';
 import { reach } from './along.ts';
 import type { Chart } from './chart.ts';
 import { shearRangePanel } from './shear-range-panel.ts';
@@ -55,7 +56,7 @@ function title({ run, connections, governing }: RunResult): string {
 }
 
 function subtitle({ run, connections }: RunResult): string {
-  const failing = connections.filter(({ verdict }) => verdict === 'fails').length;
+  const failing = connections.filter(connectionFails).length;
   const count = connections.length === 1 ? '1 connection' : `${connections.length} connections`;
   const kinds = [...new Set(run.fasteners.map(({ id }) => id))].join(', ');
   const roles =
