@@ -7,7 +7,13 @@ import { numberForm, numberReader } from './number-form.ts';
 import type { RecordClock } from './record-clock.ts';
 import { type RecordColumn, recordColumns } from './record-columns.ts';
 import type { RecordForm } from './record-form.ts';
-import { cutLine, type RecordLayout, recordLayout } from './record-layout.ts';
+import {
+  cutLine,
+  type RecordLayout,
+  recordLayout,
+  type WrittenRow,
+  writtenRows,
+} from './record-layout.ts';
 import type { RecordRows } from './record-rows.ts';
 import type { RepeatedFaults } from './repeated-faults.ts';
 import { cutRows, OpenQuoteError, type TakeRow } from './row-blocks.ts';
@@ -44,8 +50,9 @@ export interface PreparedFile extends RecordFile {
   readonly firstTime: WrittenTime | null;
 }
 
-/** Lines that the layout and the form of the numbers are found from. */
-const LINES_LOOKED_AT = 1000;
+/** Rows and characters that the layout and the form of the numbers are found from. */
+const ROWS_LOOKED_AT = 1000;
+const LOOKED_AT = 1 << 16;
 
 /**
  * Finds how a file of the record is written: its encoding, header and columns, numbers, and the order of its dates.
@@ -57,18 +64,17 @@ export async function prepareFile(
   { form, findings }: RecordReading,
 ): Promise<PreparedFile | null> {
   const encoding = form.encoding ?? (await encodingOf(file.bytes));
-  const lines = await firstLines(file, encoding, findings);
-  if (lines === null) return null;
+  const written = await firstRows(file, encoding, findings);
+  if (written === null) return null;
   const wanted = form.mapping && [...form.mapping.entries.keys()];
-  const layout = recordLayout(lines, wanted, form.layout);
+  const layout = recordLayout(written, wanted, form.layout);
   const columns = recordColumns(layout, file.name, form.mapping, findings);
   if (columns === null) return null;
   const time = columns.filter(({ measure }) => measure === null);
   const channels = columns.filter(({ measure }) => measure !== null);
-  const rows = lines
-    .slice(layout.dataLine - 1)
-    .filter((line) => line !== '')
-    .map((line) => cutLine(line, layout.separator));
+  const rows = written
+    .filter(({ text, line }) => line >= layout.dataLine && text !== '')
+    .map(({ text }) => cutLine(text, layout.separator));
   const toNumber = numbersOf(rows, channels, { file, layout, form, findings });
   if (toNumber === null) return null;
   const found = { ...file, encoding, layout, time, channels, toNumber };
@@ -79,19 +85,24 @@ export async function prepareFile(
   return { ...found, order, firstTime: firstTime ?? null };
 }
 
-async function firstLines(
+async function firstRows(
   { name, bytes }: RecordFile,
   encoding: Encoding,
   findings: Findings,
-): Promise<string[] | null> {
+): Promise<WrittenRow[] | null> {
+  let start = '';
   try {
     for await (const text of textBlocks(bytes, encoding)) {
-      const lines = text.split('\n', LINES_LOOKED_AT);
-      if (lines.some((line) => line.trim() !== '')) return lines;
+      start += text;
+      if (start.length >= LOOKED_AT) break;
     }
   } catch (error) {
     return reportFault(error, name, findings);
   }
+  // The last line may have been cut short, which turns numbers into others.
+  const whole = start.length < LOOKED_AT ? start : start.slice(0, start.lastIndexOf('\n') + 1);
+  const rows = writtenRows(whole || start).slice(0, ROWS_LOOKED_AT);
+  if (rows.some(({ text }) => text.trim() !== '')) return rows;
   return report(findings, { file: name, line: 1 }, { expected: 'a header row' });
 }
 

@@ -13,6 +13,13 @@ export interface RecordLayout {
   readonly headers: readonly string[];
 }
 
+/** A row as it stands: mostly a line, more of them where line ends stand between quotes. */
+export interface WrittenRow {
+  readonly text: string;
+  /** Its first line, from 1. */
+  readonly line: number;
+}
+
 /** What the job says of the layout; `null` where it is to be found. */
 export interface LayoutGiven {
   readonly separator: string | null;
@@ -28,32 +35,37 @@ const SEPARATORS = [',', ';', '\t', '|'];
  * line that, cut by one of the separators, holds every wanted header. Where there is none, the line that comes
  * closest, so that what is missing can be told.
  *
- * @param lines the file's first lines
+ * @param rows the file's first rows
  * @param wanted headers that the job maps; `null` for the plain form with a column `time`
  * @param given what the job says
  */
 export function recordLayout(
-  lines: readonly string[],
+  rows: readonly WrittenRow[],
   wanted: readonly string[] | null,
   given: LayoutGiven,
 ): RecordLayout {
   const separators = given.separator === null ? SEPARATORS : [given.separator];
-  if (given.headerLine === 0) return withoutHeader(lines, separators, given);
-  let best = { score: -1, separator: separators[0], headerLine: 1, headers: [] as string[] };
-  const from = given.headerLine === null ? 0 : given.headerLine - 1;
-  const to = given.headerLine === null ? lines.length : given.headerLine;
+  if (given.headerLine === 0) return withoutHeader(rows, separators, given);
+  let best = { score: -1, separator: separators[0], row: rows[0], headers: [] as string[] };
   const whole = wanted?.length ?? 1;
-  for (let i = from; i < to && best.score < whole; i++) {
-    if ((lines[i] ?? '').trim() === '') continue;
+  for (const row of rows) {
+    if (best.score >= whole) break;
+    if (row.text.trim() === '' || (given.headerLine ?? row.line) !== row.line) continue;
     for (const separator of separators) {
-      const headers = cutLine(lines[i], separator).map((cell) => cell.trim());
+      const headers = cutLine(row.text, separator).map(plainHeader);
       // Of equal scores the line that is cut into more cells, up to one in all.
       const score = scoreOf(headers, wanted) + headers.length / (headers.length + 1);
-      if (score > best.score) best = { score, separator, headerLine: i + 1, headers };
+      if (score > best.score) best = { score, separator, row, headers };
     }
   }
-  const { separator, headerLine, headers } = best;
-  return { separator, headerLine, headers, dataLine: given.dataLine ?? headerLine + 1 };
+  const { separator, row, headers } = best;
+  const below = row.line + row.text.split('\n').length;
+  return { separator, headerLine: row.line, headers, dataLine: given.dataLine ?? below };
+}
+
+/** A header without line ends and doubled spaces. */
+function plainHeader(cell: string): string {
+  return cell.trim().replace(/\s+/g, ' ');
 }
 
 /** How many wanted headers a line holds. */
@@ -64,25 +76,54 @@ function scoreOf(headers: readonly string[], wanted: readonly string[] | null): 
 }
 
 function withoutHeader(
-  lines: readonly string[],
+  rows: readonly WrittenRow[],
   separators: readonly string[],
   { dataLine }: LayoutGiven,
 ): RecordLayout {
-  const first = Math.max(
-    0,
-    lines.findIndex((line, i) => i + 1 >= (dataLine ?? 1) && line.trim() !== ''),
-  );
-  const cuts = separators.map((separator) => cutLine(lines[first] ?? '', separator).length);
+  const isData = ({ text, line }: WrittenRow) => line >= (dataLine ?? 1) && text.trim() !== '';
+  const first = rows.find(isData) ?? rows[0];
+  const cuts = separators.map((separator) => cutLine(first.text, separator).length);
   const most = Math.max(...cuts);
   return {
     separator: separators[cuts.indexOf(most)],
     headerLine: 0,
-    dataLine: first + 1,
+    dataLine: first.line,
     headers: Array.from({ length: most }, (_, i) => String(i + 1)),
   };
 }
 
-/** One line's cells; a line with a quote that is never closed is cut as it stands. */
+/** The longest row, in lines, that a header between quotes may make. */
+const MOST_LINES = 10;
+
+/** A text's rows: a line with a quote that is left open goes on in the next ones, where one of them closes it. */
+export function writtenRows(text: string): WrittenRow[] {
+  const lines = text.split('\n');
+  const rows: WrittenRow[] = [];
+  for (let i = 0; i < lines.length; ) {
+    const end = endOfRow(lines, i);
+    rows.push({ text: lines.slice(i, end).join('\n'), line: i + 1 });
+    i = end;
+  }
+  return rows;
+}
+
+/** Index behind the last line of the row that begins in a line. */
+function endOfRow(lines: readonly string[], start: number): number {
+  let open = isOpen(lines[start]);
+  if (!open) return start + 1;
+  for (let i = start + 1; i < Math.min(lines.length, start + MOST_LINES); i++) {
+    open = open !== isOpen(lines[i]);
+    if (!open) return i + 1;
+  }
+  return start + 1;
+}
+
+/** True where a quote is left open. */
+function isOpen(text: string): boolean {
+  return text.split('"').length % 2 === 0;
+}
+
+/** One row's cells; a row with a quote that is never closed is cut as it stands. */
 export function cutLine(line: string, separator: string): string[] {
   if (!line.includes('"')) return line.split(separator);
   try {

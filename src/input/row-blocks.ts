@@ -34,6 +34,7 @@ export async function cutRows(
     const text = held + block;
     const end = text.includes('"') ? lastEndOutsideQuotes(text) : text.lastIndexOf('\n') + 1;
     held = text.slice(end);
+    if (end === 0 && held.length <= LONGEST_ROW) continue;
     if (held.length > LONGEST_ROW) throw new OpenQuoteError(line + linesIn(text.slice(0, end)));
     const next = takeAll(text.slice(0, end), separator, line, take);
     if (next === null) return;

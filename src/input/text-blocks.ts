@@ -11,24 +11,31 @@ export class EncodingError extends Error {}
  * Windows-1252, in which figures and plain letters are the same.
  */
 export async function encodingOf(file: FileBytes): Promise<Encoding> {
-  let first = true;
   const decoder = new TextDecoder('utf-8', { fatal: true });
+  const start: number[] = [];
+  let isUtf8 = true;
+  for await (const block of file.blocks()) {
+    if (start.length < LOOKED_AT) start.push(...block.subarray(0, LOOKED_AT - start.length));
+    isUtf8 &&= isValid(() => decoder.decode(block, { stream: true }));
+    if (!isUtf8 && start.length === LOOKED_AT) break;
+  }
+  isUtf8 &&= isValid(() => decoder.decode());
+  return wideEncodingOf(start) ?? (isUtf8 ? 'utf-8' : 'windows-1252');
+}
+
+/** Bytes that tell UTF-16. */
+const LOOKED_AT = 1000;
+
+function isValid(run: () => unknown): boolean {
   try {
-    for await (const block of file.blocks()) {
-      const wide = first ? wideEncodingOf(block.subarray(0, 1000)) : null;
-      if (wide !== null) return wide;
-      first = false;
-      decoder.decode(block, { stream: true });
-    }
-    decoder.decode();
-    return 'utf-8';
-  } catch (error) {
-    if (error instanceof TypeError) return 'windows-1252';
-    throw error;
+    run();
+    return true;
+  } catch {
+    return false;
   }
 }
 
-function wideEncodingOf(start: Uint8Array): Encoding | null {
+function wideEncodingOf(start: readonly number[]): Encoding | null {
   if (start[0] === 0xff && start[1] === 0xfe) return 'utf-16le';
   if (start[0] === 0xfe && start[1] === 0xff) return 'utf-16be';
   const blanks = [0, 0];

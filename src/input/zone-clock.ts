@@ -50,7 +50,8 @@ export async function zoneClock(zone: string, around: number): Promise<ZoneClock
     const first = plain.toZonedDateTime(zone, { disambiguation: 'earlier' });
     const second = plain.toZonedDateTime(zone, { disambiguation: 'later' });
     const [begin, end] = [
-      second.getTimeZoneTransition('previous'),
+      // Of a time at the change itself the change counts as the previous one.
+      second.add({ milliseconds: 1 }).getTimeZoneTransition('previous'),
       second.getTimeZoneTransition('next'),
     ];
     const offset = second.offsetNanoseconds / 1e6;
