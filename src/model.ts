@@ -620,6 +620,8 @@ export interface Remedy {
   readonly added: number;
   /** Width of the new joints at lock-in [mm]; `null` without one. */
   readonly gap: number | null;
+  /** Width that the gap at the run's right end is given [mm]; left out where it stays as drawn. */
+  readonly endGap?: number;
   /** Largest utilisation of any check, before and after. */
   readonly utilisationBefore: number;
   readonly utilisation: number;

@@ -1,11 +1,13 @@
-import { createDamageTables } from '../damage/damage-table.ts';
+import { createDamageTables, type DamageTables } from '../damage/damage-table.ts';
 import type { Job, Result, RunResult } from '../model.ts';
 import { assessRun } from './assess.ts';
 import { searchFor, utilisationOf } from './candidate.ts';
 import { firstLargest } from './first-largest.ts';
+import { joinRemedies } from './join-remedies.ts';
 import { withJointGaps } from './joint-gaps.ts';
 import { remedyOf } from './remedy.ts';
 import { warmedRuns } from './warmed.ts';
+import { withEndGap } from './with-end-gap.ts';
 import { withVerdicts } from './with-verdicts.ts';
 
 /**
@@ -18,15 +20,20 @@ import { withVerdicts } from './with-verdicts.ts';
 export function screen(job: Job, options: { readonly remedies?: boolean } = {}): Result {
   const tables = createDamageTables();
   const assessed = withJointGaps(job.runs.map((run) => assessRun(run, job, tables)));
-  const remedied = (run: RunResult): RunResult =>
-    run.connections.every(({ verdict }) => verdict === 'ok')
-      ? run
-      : withVerdicts({ ...run, remedy: remedyOf(run, searchFor(run.run, job, tables)) });
-  const runs = options.remedies === false ? assessed : assessed.map(remedied);
+  const runs = options.remedies === false ? assessed : remedied(assessed, job, tables);
   return {
     job,
     runs,
     warmed: warmedRuns(job, tables),
     governing: firstLargest(runs.map(utilisationOf)),
   };
+}
+
+function remedied(runs: readonly RunResult[], job: Job, tables: DamageTables): RunResult[] {
+  const alone = runs.map((run) =>
+    run.connections.every(({ verdict }) => verdict === 'ok')
+      ? run
+      : { ...run, remedy: remedyOf(run, searchFor(run.run, job, tables)) },
+  );
+  return joinRemedies(alone, job, tables).map(withVerdicts).map(withEndGap);
 }
