@@ -2,6 +2,7 @@
 import { Command, CommanderError, Option } from 'commander';
 import type { CommandOutcome, ScreenOptions } from './commands/screen.ts';
 import type { SpacingsOptions } from './commands/spacings.ts';
+import type { TemperaturesOptions } from './commands/temperatures.ts';
 import { Interrupted } from './commands/write-results.ts';
 import { InputError, wordIssues } from './issue.ts';
 import { version } from './output/version.ts';
@@ -75,6 +76,23 @@ function commands(report: (outcome: CommandOutcome, strict: boolean) => void): C
     .action(async (job: string, options: ScreenOptions & { strict?: boolean }) => {
       const { screenCommand } = await import('./commands/screen.ts');
       report(await screenCommand(job, options), options.strict ?? false);
+    });
+  program
+    .command('temperatures')
+    .description('Show the zones alone: tables of every sample and day, a summary and charts.')
+    .argument('<job>', 'the job file, or a folder that holds job.yaml')
+    .option(
+      '--out <dir>',
+      "folder for the results (default: reports/, the job's name and -temperatures)",
+    )
+    .addOption(
+      new Option('--charts <which>', 'charts of all zones, or none')
+        .choices(['all', 'none'])
+        .default('all'),
+    )
+    .action(async (job: string, options: TemperaturesOptions) => {
+      const { temperaturesCommand } = await import('./commands/temperatures.ts');
+      report(await temperaturesCommand(job, options), false);
     });
   addSpacings(program, report);
   return program;

@@ -170,7 +170,8 @@ export function resultUnit(quantity: Quantity, system: UnitSystem): ResultUnit {
   return { name: unit.replace('deg', '°'), from: (value) => value / size + zero };
 }
 
-interface ResultUnit {
+/** A unit that results are written in. */
+export interface ResultUnit {
   readonly name: string;
   /** A value in base units (a temperature in °C), in this unit. */
   readonly from: (value: number) => number;

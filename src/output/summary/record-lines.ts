@@ -5,10 +5,6 @@ import { wrap } from './text-layout.ts';
 
 /** The record's span and step, the days that it covers, the years that it stands for, and the passes. */
 export function recordLines({ job, runs }: Result): string[] {
-  const { times, stepHours } = job.axis;
-  const first = stamp(times[0]);
-  const last = stamp(times[times.length - 1]);
-  const span = `Record: ${grouped(times.length)} samples, ${first} to ${last}, every ${shortNumber(stepHours)} h.`;
   const covered = groupedRuns(
     runs.map((run) => [run.run.id, `${shortNumber(run.coveredHours / 24)} days`]),
   );
@@ -16,13 +12,20 @@ export function recordLines({ job, runs }: Result): string[] {
   const passes = groupedRuns(runs.map((run) => [run.run.id, String(run.passes)]));
   return [
     ...weatherLine(job),
-    wrap(`${span} It covers ${covered} and stands for ${years}.`),
+    wrap(`${spanText(job)} It covers ${covered} and stands for ${years}.`),
     wrap(`Passes through it until no slip changed: ${passes}.`),
   ];
 }
 
-/** The weather file that the record was read from. */
-function weatherLine({ weather }: Job): string[] {
+/** The record's samples, span and step. */
+export function spanText({ axis: { times, stepHours } }: Job): string {
+  const first = stamp(times[0]);
+  const last = stamp(times[times.length - 1]);
+  return `Record: ${grouped(times.length)} samples, ${first} to ${last}, every ${shortNumber(stepHours)} h.`;
+}
+
+/** The weather file that the record was read from; nothing for a CSV. */
+export function weatherLine({ weather }: Job): string[] {
   if (weather === null) return [];
   const { place, years, setOn } = weather;
   const [first, last] = years;
