@@ -3,11 +3,9 @@ import type { Place } from '../issue.ts';
 import { cellName } from './cell-name.ts';
 import { reportCsvFault } from './csv-fault.ts';
 import { type Findings, report } from './findings.ts';
+import { LONGEST_TEXT, soundText } from './sound-text.ts';
 import type { SourceEntry, SourceMap } from './source.ts';
 import { type Cell, type Column, tableColumns, withUnitsRow } from './table-columns.ts';
-
-/** Longer than anything that a cell may hold; a mark that a quote is missing or the file is something else. */
-export const LONGEST_TEXT = 2000;
 
 /**
  * Reads a small CSV table as spreadsheets write it (RFC 4180; cells between commas, semicolons or tabs; a header
@@ -35,7 +33,7 @@ function readCells(text: string, file: string, findings: Findings): Cell[][] {
     // The parser stands at the end of the cell: the next one begins behind the separator.
     const place = placeAt(end + 1, index);
     end = bytes;
-    return { text: sound(cell.trim(), place, findings), place };
+    return { text: soundText(cell.trim(), place, findings), place };
   };
   let rows: Cell[][];
   try {
@@ -63,17 +61,6 @@ function delimiterOf(text: string): { delimiter: string; body: string } {
   const count = (mark: string) => header.replace(/"[^"]*"/g, '').split(mark).length;
   const [best] = [',', ';', '\t'].sort((a, b) => count(b) - count(a));
   return { delimiter: best, body: text };
-}
-
-/** The cell's text; blank where it is far too long, which is reported. */
-function sound(text: string, place: Place, findings: Findings): string {
-  if (text.length <= LONGEST_TEXT) return text;
-  report(findings, place, {
-    found: `${text.slice(0, 20)}…, ${text.length} characters`,
-    expected: `a cell of at most ${LONGEST_TEXT} characters`,
-    hint: 'A double quote may be missing at its end.',
-  });
-  return '';
 }
 
 /**

@@ -10,6 +10,7 @@ import {
 } from 'yaml';
 import type { Place } from '../issue.ts';
 import { type Findings, report } from './findings.ts';
+import { soundText } from './sound-text.ts';
 import { pathOf, type Source, type SourceEntry, type SourceMap } from './source.ts';
 
 /**
@@ -43,7 +44,9 @@ type At = (offset: number) => Place;
 /** One node with all below it. */
 function build(node: ParsedNode, at: At, key: string, findings: Findings): Source {
   const place: Place = { ...at(node.range[0]), ...(key === '' ? {} : { key }) };
-  if (isScalar(node)) return { type: 'text', text: typedText(node), place };
+  if (isScalar(node)) {
+    return { type: 'text', text: soundText(typedText(node), place, findings), place };
+  }
   if (isSeq(node)) {
     const items = node.items.map((item, i) => build(item, at, `${key}[${i + 1}]`, findings));
     return { type: 'list', items, place };
@@ -82,7 +85,7 @@ function entriesOf(
       report(findings, keyPlace, { expected: 'a key' });
       continue;
     }
-    const name = typedText(key);
+    const name = soundText(typedText(key), keyPlace, findings);
     const path = pathOf(place, name);
     const blank: Source = { type: 'text', text: '', place: { ...keyPlace, key: path } };
     entries.set(name, {
