@@ -4,6 +4,7 @@ import type { ChartChoice } from '../output/charts/choose-charts.ts';
 import { checksCsv } from '../output/checks-csv.ts';
 import { cyclesCsv } from '../output/cycles-csv.ts';
 import { manifestJson } from '../output/manifest-json.ts';
+import { recordCsv } from '../output/record-csv.ts';
 import { resultsCsv } from '../output/results-csv.ts';
 import { runFails } from '../output/run-fails.ts';
 import { summary } from '../output/summary/summary.ts';
@@ -62,6 +63,7 @@ async function write(
     { name: 'results.csv', content: resultsCsv(result) },
     { name: 'checks.csv', content: checksCsv(result) },
     { name: 'cycles.csv', content: cyclesCsv(result) },
+    { name: 'record.csv', content: recordCsv(result.job) },
     ...present('years.csv', yearsCsv(result)),
     ...present('warming.csv', warmingCsv(result)),
     ...(await drawCharts(result, charts)),

@@ -153,7 +153,8 @@ export const STUCK_KEYS = {
     to: 1e6,
     default: '24 h',
     example: '24 h',
-    meaning: 'A value that stands unchanged for longer than this is stuck.',
+    meaning:
+      'A value is stuck that stands unchanged for longer than this, and for longer than five times what nine in ten of the unchanged stretches of its channel last.',
   },
   rule: {
     kind: 'choice',

@@ -8,6 +8,7 @@ import { exempt, failures, notGiven } from './check-groups.ts';
 import { damageTable } from './damage-table.ts';
 import { defaultLines } from './default-lines.ts';
 import { derivedLines } from './derived-lines.ts';
+import { foundLines } from './found-lines.ts';
 import { CAUTION, notes, warnings } from './notes.ts';
 import { recordLines } from './record-lines.ts';
 import { runTable } from './run-table.ts';
@@ -39,6 +40,7 @@ export function summary(result: Result): string {
     section(warmingTitle(job), warmingTable(result)),
     section('Zones reckoned from sun and air', sunLines(job)),
     section('To bear in mind', notes(result)),
+    section('Found in the record', foundLines(job)),
     section('Warnings', warnings(result)),
     section('Worked out from other values', derivedLines(job)),
     section('Left at their defaults', defaultLines(job.defaults)),
