@@ -151,9 +151,11 @@ async function orderOf(file: Found, findings: Findings): Promise<DateOrder | nul
   });
   if (order !== null || open === null) return order;
   const { found, place } = open as { found: string; place: Place };
+  const why =
+    orderSaidBy(found) === 'open' ? 'the year has two figures' : 'no day of the file is over 12';
   report(findings, place, {
     found,
-    expected: 'dates whose order of day, month and year is clear: no day here is over 12',
+    expected: `dates whose order of day, month and year is clear: ${why}`,
     hint: 'Say it in the job, such as record.time.order: day-first.',
   });
   return undefined;
@@ -186,7 +188,7 @@ export async function readFileRows(
       faults.add(kind, placeIn(name, cells, line, time[0]), {
         found: text,
         ...TIME_FAULTS[kind],
-        ...(kind === 'none' ? widthHint(line, layout) : {}),
+        ...(kind === 'none' ? timeHint(line, file) : {}),
       });
     const written = toTime(text);
     const own = written === null ? 'none' : clock.read(written);
@@ -226,6 +228,11 @@ function widthHint(line: number, { headerLine, dataLine }: RecordLayout): { hint
   const above =
     headerLine === 0 ? 'above the data' : `between the header in line ${headerLine} and the data`;
   return { hint: `If this line stands ${above}, say where the data begin: record.data_line.` };
+}
+
+function timeHint(line: number, { layout, order }: PreparedFile): { hint?: string } {
+  if (line === layout.dataLine || order === null) return widthHint(line, layout);
+  return { hint: `Dates of this file are read ${order}.` };
 }
 
 type TimeParts = Pick<PreparedFile, 'time' | 'order' | 'toNumber'>;
@@ -271,14 +278,22 @@ function channelReader(
         leaveOut({ row: values.length - 1, channel: name, value });
         return;
       }
-      const wanted = isNumber ? words : 'a number';
       faults.add(`value ${name}`, placeIn(file, cells, line, column), {
         found: text,
-        expected: `${wanted}, or a blank where there is none`,
-        hint: `If this stands for a missing value, say so: record.missing: [${text.trim()}].`,
+        expected: `${isNumber ? words : 'a number'}, or a blank where there is none`,
+        hint: valueHint(text.trim(), isNumber && quantity === 'temperature'),
       });
     }
   };
+}
+
+function valueHint(text: string, isTemperature: boolean): string {
+  if (/^[+-]?\d[\d.,' ]*[.,' ][\d]+$/.test(text) && !isTemperature) {
+    return 'Say how numbers are written, such as record.decimal: comma and record.thousands: point.';
+  }
+  const missing = `If this stands for a missing value, say so: record.missing: [${text}].`;
+  if (!isTemperature) return missing;
+  return `${missing} If it is right, widen record.band; its rule may leave such values out.`;
 }
 
 /** Tells a mark for a missing value, by its word or its number, or a blank of spaces. */

@@ -63,7 +63,9 @@ function parseRows(text: string, separator: string, line: number): string[][] {
     return parse(text, { delimiter: separator, relax_column_count: true, relax_quotes: true });
   } catch (error) {
     if (!(error instanceof CsvError)) throw error;
-    throw new OpenQuoteError(line - 1 + (Number(error.lines) || 1));
+    // The text begins with the row whose quote stays open.
+    const within = error.code === 'CSV_QUOTE_NOT_CLOSED' ? 1 : Number(error.lines) || 1;
+    throw new OpenQuoteError(line - 1 + within);
   }
 }
 
