@@ -14,10 +14,10 @@ export function answerText({ rows, answer }: SpacingCase, units: UnitSystem): st
     widest !== null
       ? passing(widest, answer, units)
       : nearest !== null
-        ? failing(nearest, units)
+        ? failing(nearest, answer.others, units)
         : 'No limit was given for anything, so nothing was checked.';
-  const help = answer.help === null ? alone(rows) : helpText(answer.help, units);
-  return `${verdict} ${help}`.trimEnd();
+  const helps = answer.helps.map((help) => helpText(help, units));
+  return [verdict, ...helps, alone(rows)].filter((part) => part !== '').join(' ');
 }
 
 function passing(
@@ -35,8 +35,9 @@ function passing(
   return `${passes}${closer} Beyond it, ${failure(stop, units)}.`;
 }
 
-function failing(nearest: SpacingRow, units: UnitSystem): string {
-  return `No spacing tried passes. The nearest to it: ${failure(nearest, units)}.`;
+function failing(nearest: SpacingRow, others: readonly SpacingRow[], units: UnitSystem): string {
+  const also = others.map((row) => ` Where another check governs: ${failure(row, units)}.`);
+  return `No spacing tried passes. The nearest to it: ${failure(nearest, units)}.${also.join('')}`;
 }
 
 function used(at: CheckAt | null): string {
@@ -68,5 +69,5 @@ function helpText(help: FastenerHelp, units: UnitSystem): string {
   const { check, few, fewUse, many, manyUse } = help;
   const closer = `from ${few.count} to ${many.count} of them (${lengthText(few.spacing, units)} to ${lengthText(many.spacing, units)})`;
   const change = `${check} goes from ${shortNumber(fewUse)} to ${useText(manyUse)}`;
-  return `More fasteners ${HELP[help.effect]}: ${closer} ${change}. ${reasonText(help, units)}`;
+  return `More fasteners ${HELP[help.effect]}: ${closer} ${change}. ${reasonText(help, units)}`.trimEnd();
 }

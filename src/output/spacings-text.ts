@@ -100,7 +100,7 @@ function answerTable({ cases, job: { units } }: SpacingComparison): string {
       check?.check ?? (widest === null ? 'nothing to check' : 'nothing tried'),
       check === undefined ? '' : useNumber(check.utilisation ?? 0),
       failing === null ? '' : lengthText(failing.spacing, units),
-      answer.help === null ? '' : CLOSER_HELPS[answer.help.effect],
+      answer.helps.length === 0 ? '' : CLOSER_HELPS[answer.helps[0].effect],
     ];
   });
   return table([header, ...rows], [2, 3, 5, 6]);

@@ -13,8 +13,10 @@ export interface SpacingAnswer {
   readonly stop: SpacingRow | null;
   /** Where none passes: the one whose governing check is used least. */
   readonly nearest: SpacingRow | null;
-  /** What more fasteners do to the check that decides; `null` where that cannot be told. */
-  readonly help: FastenerHelp | null;
+  /** Where none passes: of the rows that another check governs, the one used least, for each such check. */
+  readonly others: readonly SpacingRow[];
+  /** What more fasteners do to each check that decides, the first one first; without those that cannot be told. */
+  readonly helps: readonly FastenerHelp[];
 }
 
 /**
@@ -33,15 +35,17 @@ export function spacingAnswer(
   const last = rows.findLastIndex(({ passes }) => passes === true);
   const widest = rows[last] ?? null;
   const stop = widest === null ? null : (rows[last + 1] ?? null);
-  const nearest = widest === null ? leastUsed(rows) : null;
-  const deciding = stop ?? nearest ?? rows[rows.length - 1];
-  const check = deciding.governing?.check.check;
+  const [nearest, ...others] = widest === null ? leastUsed(rows) : [];
+  const deciding = nearest === undefined ? [stop ?? rows[rows.length - 1]] : [nearest, ...others];
   return {
     widest,
     failingBelow: rows.slice(0, Math.max(0, last)).filter(({ passes }) => passes === false),
     stop,
-    nearest,
-    help: check === undefined ? null : fastenerHelp(rows, check, run, arrangement),
+    nearest: nearest ?? null,
+    others,
+    helps: deciding.flatMap(({ governing }) =>
+      governing === null ? [] : (fastenerHelp(rows, governing.check.check, run, arrangement) ?? []),
+    ),
   };
 }
 
@@ -50,9 +54,10 @@ export function unlikeRows(rows: readonly SpacingRow[]): SpacingRow[] {
   return rows.filter(({ count }, i) => i === 0 || count !== rows[i - 1].count);
 }
 
-function leastUsed(rows: readonly SpacingRow[]): SpacingRow | null {
-  const judged = rows.filter(({ governing }) => governing !== null);
-  if (judged.length === 0) return null;
+/** For each check that governs anywhere, the row where it governs and is used least; the least of all first. */
+function leastUsed(rows: readonly SpacingRow[]): SpacingRow[] {
   const use = ({ governing }: SpacingRow) => governing?.check.utilisation ?? 0;
-  return judged.reduce((a, b) => (use(b) < use(a) ? b : a));
+  const rising = rows.filter(({ governing }) => governing !== null).sort((a, b) => use(a) - use(b));
+  const name = ({ governing }: SpacingRow) => governing?.check.check;
+  return rising.filter((row, i) => rising.findIndex((one) => name(one) === name(row)) === i);
 }

@@ -2,11 +2,13 @@ import { chainBench } from './chain.bench-part.ts';
 import { countingBench } from './counting.bench-part.ts';
 import type { BenchRow } from './in-turns.ts';
 import { jobsBench } from './jobs.bench-part.ts';
+import { spacingsBench } from './spacings.bench-part.ts';
 
 const parts: readonly (readonly [string, () => BenchRow[]])[] = [
   ['Counting and damage, against summing the same array', countingBench],
   ['Chain, against 8,760 bare tridiagonal solves', chainBench],
   ['Whole jobs, against node -e 0', jobsBench],
+  ['Comparing spacings, against 2 s', spacingsBench],
 ];
 
 for (const [title, part] of parts) {

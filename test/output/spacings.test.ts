@@ -147,14 +147,16 @@ const setOf = ({ configuration }: Chart, label: string): Point[] =>
   configuration.data.datasets.find((set) => set.label === label)?.data ?? [];
 
 describe('charts of spacings', () => {
-  it('are two a case, plain data with finite numbers, names apart', () => {
+  it('are two a case, one where nothing is checked, plain data with finite numbers, names apart', () => {
     for (const units of ['SI', 'US'] as const) {
       const comparison = compare(
         { cuts: [{ pieces: 1 }, { pieces: 2 }, { longest: 4000 }] },
         units,
       );
       const charts = spacingsCharts(comparison);
-      expect(charts).toHaveLength(2 * comparison.cases.length);
+      const unchecked = comparison.cases.filter(({ run }) => run.id === 'bare');
+      expect(unchecked.length).toBeGreaterThan(0);
+      expect(charts).toHaveLength(2 * comparison.cases.length - unchecked.length);
       expect(new Set(charts.map(({ name }) => name)).size).toBe(charts.length);
       for (const chart of charts) {
         expect(JSON.parse(JSON.stringify(chart)), chart.name).toEqual(chart);

@@ -260,7 +260,7 @@ describe('other arrangements', () => {
 describe('what more fasteners do', () => {
   it('is little for a long elastic row: its end shear goes with the root of the spacing', () => {
     const { answer, rows } = caseOf('long', { spacings: [150, 600] });
-    const { help } = answer;
+    const [help] = answer.helps;
     expect(help).toMatchObject({ check: 'shear range', effect: 'little' });
     // k·ε·√(EA·s/k), the continuous row (Volkersen 1938, from memory), is the limit of close fasteners
     expect(rows[0].shearRange / (ALPHA * RANGE * Math.sqrt(EA * 150 * K))).toBeCloseTo(1, 1);
@@ -273,7 +273,7 @@ describe('what more fasteners do', () => {
   });
 
   it('is nothing for a short one: its ends move almost freely', () => {
-    const { help } = caseOf('short', { spacings: [90, 300] }).answer;
+    const [help] = caseOf('short', { spacings: [90, 300] }).answer.helps;
     expect(help?.effect).toBe('none');
     expect(help?.reason).toMatchObject({ why: 'shear lag', halfLength: 450 });
     // k·ε·L/2, the shear of a fastener at the end of a member that nothing holds
@@ -291,20 +291,21 @@ describe('what more fasteners do', () => {
       expect(row.shearRange / (EA * ALPHA * RANGE)).toBeCloseTo(1, 5);
     }
     expect(answer.widest).toBeNull();
-    expect(answer.help).toMatchObject({ effect: 'none', reason: { why: 'rigid fasteners' } });
+    expect(answer.helps[0]).toMatchObject({ effect: 'none', reason: { why: 'rigid fasteners' } });
   });
 
   it('is nothing where joints slip both ways: twice the grip', () => {
     const { answer, rows } = caseOf('clamp', { spacings: [300, 600] });
     for (const row of rows) expect(row.shearRange).toBeCloseTo(1000, 2);
-    expect(answer.help).toMatchObject({
+    expect(answer.helps[0]).toMatchObject({
       effect: 'none',
       reason: { why: 'slips both ways', grip: 500, throughout: true },
     });
   });
 
   it('is nothing for the travel of a slot', () => {
-    const { help } = caseOf('slide', { arrangements: ['first'], spacings: [300, 600] }).answer;
+    const { helps } = caseOf('slide', { arrangements: ['first'], spacings: [300, 600] }).answer;
+    const [help] = helps;
     expect(help).toMatchObject({
       check: 'slot travel',
       effect: 'none',
@@ -327,7 +328,22 @@ describe('what more fasteners do', () => {
       const use = demand / bucklingResistance(strut, rule);
       expect(useOf(row, 'buckling')).toBeCloseTo(use, 9);
     }
-    expect(answer.help).toMatchObject({ check: 'buckling', effect: 'much', reason: null });
+    expect(answer.helps[0]).toMatchObject({ check: 'buckling', effect: 'much', reason: null });
+  });
+
+  it('is told of every check that governs where nothing passes', () => {
+    // a shear range that even a close row exceeds, and a member that buckles between wide ones
+    const strut = runOf('strut');
+    const fixedType = { ...strut.fixedType, shearRangeLimit: 4000 };
+    const runs = [{ ...strut, fixedType }];
+    const question = { runs, spacings: [150, 1200], arrangements: null, cuts: [WHOLE] };
+    const { answer, rows } = compareSpacings(job, question).cases[0];
+    const governing = rows.map((row) => row.governing?.check);
+    expect(governing.map((check) => check?.check)).toEqual(['shear range', 'buckling']);
+    expect(governing[0]?.utilisation).toBeGreaterThan(1);
+    expect(answer.nearest).toBe(rows[0]);
+    expect(answer.others).toEqual([rows[1]]);
+    expect(answer.helps.map(({ check }) => check)).toEqual(['shear range', 'buckling']);
   });
 
   it('is not said of a run that nothing is given for', () => {
@@ -337,7 +353,8 @@ describe('what more fasteners do', () => {
       failingBelow: [],
       stop: null,
       nearest: null,
-      help: null,
+      others: [],
+      helps: [],
     });
     for (const { passes, governing, notGiven } of rows) {
       expect(passes).toBeNull();

@@ -3,10 +3,12 @@ import type { Chart } from './chart.ts';
 import { spacingsForceChart } from './spacings-force-chart.ts';
 import { spacingsUseChart } from './spacings-use-chart.ts';
 
-/** Two charts a run, arrangement and cut: utilisation over spacing, and forces over spacing. */
+/** The charts of each run, arrangement and cut: utilisation over spacing where anything is checked, and forces. */
 export function spacingsCharts({ job, cases }: SpacingComparison): Chart[] {
   return cases.flatMap((one) => [
-    spacingsUseChart(one, job.units),
+    ...(one.rows.some(({ governing }) => governing !== null)
+      ? [spacingsUseChart(one, job.units)]
+      : []),
     spacingsForceChart(one, job.units),
   ]);
 }

@@ -19,7 +19,7 @@ const MOST_LINEAR = 4;
 /** Least utilisation of a logarithmic scale; smaller ones are drawn at it. */
 const LEAST = 0.01;
 
-/** The utilisation of each check over the spacing, with the spacings that pass marked. */
+/** The utilisation of each check over the spacing, with the spacings that pass marked; at least one was checked. */
 export function spacingsUseChart(of: SpacingCase, units: UnitSystem): Chart {
   const rows = unlikeRows(of.rows);
   const lines = linesOf(rows, units);
@@ -88,11 +88,11 @@ function title(of: SpacingCase, units: UnitSystem): string {
   const { widest, stop, nearest } = of.answer;
   const name = caseText(of, units);
   const check = (stop ?? nearest)?.governing?.check;
-  if (widest === null) {
-    if (nearest === null || check === undefined) return `${name}: nothing was checked`;
+  if (nearest !== null && check !== undefined) {
     const at = lengthText(nearest.spacing, units);
     return `${name}: no spacing tried passes; ${check.check} is ${useText(check.utilisation ?? 0)} at ${at}`;
   }
+  if (widest === null) return `${name}: nothing was checked`;
   const passes = `${name}: ${lengthText(widest.spacing, units)} is the widest that passes`;
   if (stop === null || check === undefined) return `${passes}, and the widest tried`;
   return `${passes}; ${check.check} stops it at ${lengthText(stop.spacing, units)}`;
