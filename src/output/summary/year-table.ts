@@ -1,5 +1,6 @@
 import type { Result, RunResult, YearDamage } from '../../model.ts';
 import { shortSeason } from '../../temperature/short-season.ts';
+import { firstLargest } from '../../verdict/first-largest.ts';
 import { lifeText } from '../life-text.ts';
 import { stamp } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
@@ -14,11 +15,11 @@ export function yearTable({ runs }: Result): string[] {
     'run',
     'at',
     'years',
-    'mean damage a year',
+    'mean a year',
     'worst',
-    'worst year from',
+    'worst from',
     'life, all worst',
-    'life, all mildest',
+    'all mildest',
   ];
   const rows = runs.flatMap((run) => row(run));
   if (rows.length === 0) return [];
@@ -33,7 +34,7 @@ export function yearTable({ runs }: Result): string[] {
         ),
     ),
   );
-  const alone = `Each year as if it stood alone, with a large swing between winter and summer of its own, so that the years need not add up to the whole record.`;
+  const alone = `Damage a year, each year as if it stood alone, with a large swing between winter and summer of its own, so that the years need not add up to the whole record.`;
   return [table([header, ...rows], [2, 3, 4, 6, 7]), bullet(alone), ...[...parts].map(bullet)];
 }
 
@@ -64,9 +65,8 @@ function row(run: RunResult): string[][] {
 
 /** Index of the connection with the shortest life over the whole record; −1 where no curve was given. */
 function mostDamaged({ connections }: RunResult): number {
-  const lives = connections.map(({ life }) => life ?? Number.NaN);
-  const known = lives.filter((life) => !Number.isNaN(life));
-  return known.length === 0 ? -1 : lives.indexOf(Math.min(...known));
+  if (connections.every(({ life }) => life === null)) return -1;
+  return firstLargest(connections.map(({ life }) => (life === null ? 0 : 1 / life)));
 }
 
 function damageAt({ connections }: YearDamage, at: number): number {
