@@ -1,7 +1,7 @@
-import { createDamageTables } from '../damage/damage-table.ts';
+import { createDamageTables, type DamageTables } from '../damage/damage-table.ts';
 import type { Job, Run } from '../model.ts';
 import { type Arrangement, arrangementOf } from './arrangement.ts';
-import { type Cut, evenPieces } from './even-pieces.ts';
+import { type Cut, type EvenPieces, evenPieces } from './even-pieces.ts';
 import { type SpacingAnswer, spacingAnswer } from './spacing-answer.ts';
 import { type SpacingRow, spacingRow } from './spacing-row.ts';
 
@@ -54,45 +54,67 @@ export interface SpacingComparison {
  */
 export function compareSpacings(job: Job, question: SpacingQuestion): SpacingComparison {
   const tables = createDamageTables();
-  const cases: SpacingCase[] = [];
-  const notCompared: NotCompared[] = [];
-  for (const run of question.runs) {
-    if (run.positions.length === 1) {
-      notCompared.push({ run, why: 'one fastener' });
-      continue;
-    }
-    const own = arrangementOf(run);
-    const arrangements = question.arrangements ?? (own === null ? [] : [own]);
-    if (arrangements.length === 0) notCompared.push({ run, why: 'fixed by numbers' });
-    for (const cut of question.cuts) {
-      const few = question.spacings.filter((one) => evenPieces(run, one, 'all', cut) === null);
-      if (few.length === 0) continue;
-      notCompared.push({ run, why: 'too few fasteners for the pieces', cut, spacings: few });
-    }
-    for (const arrangement of arrangements) {
-      if (arrangement !== 'all' && run.slottedType === null) {
-        notCompared.push({ run, why: 'no slotted fastener', arrangement });
-        continue;
-      }
-      for (const cut of question.cuts) {
-        const rows = rowsOf(run, arrangement, cut);
-        if (rows.length === 0) continue;
-        const answer = spacingAnswer(rows, run, arrangement);
-        cases.push({ run, arrangement, cut, rows, answer });
-      }
-    }
-  }
-  return { job, question, cases, notCompared };
+  const compared = question.runs.map((run) => compareRun(run, job, question, tables));
+  return {
+    job,
+    question,
+    cases: compared.flatMap(({ cases }) => cases),
+    notCompared: compared.flatMap(({ notCompared }) => notCompared),
+  };
+}
 
-  /** Spacings that come to the same number of fasteners are screened once. */
-  function rowsOf(run: Run, arrangement: Arrangement, cut: Cut): SpacingRow[] {
-    const rows: SpacingRow[] = [];
-    for (const asked of question.spacings) {
-      const even = evenPieces(run, asked, arrangement, cut);
-      if (even === null) continue;
-      const alike = rows.find(({ count }) => count === even.count);
-      rows.push(alike ? { ...alike, asked } : spacingRow(asked, even, job, tables));
-    }
-    return rows;
+function compareRun(
+  run: Run,
+  job: Job,
+  question: SpacingQuestion,
+  tables: DamageTables,
+): Pick<SpacingComparison, 'cases' | 'notCompared'> {
+  if (run.positions.length === 1) {
+    return { cases: [], notCompared: [{ run, why: 'one fastener' }] };
   }
+  const own = arrangementOf(run);
+  const asked = question.arrangements ?? (own === null ? [] : [own]);
+  const possible = asked.filter((one) => one === 'all' || run.slottedType !== null);
+  const impossible = asked.filter((one) => !possible.includes(one));
+  const cases = possible.flatMap((arrangement) =>
+    question.cuts.flatMap((cut): SpacingCase[] => {
+      const screened = (even: EvenPieces, spacing: number) =>
+        spacingRow(spacing, even, job, tables);
+      const rows = rowsOf(
+        question.spacings,
+        (one) => evenPieces(run, one, arrangement, cut),
+        screened,
+      );
+      if (rows.length === 0) return [];
+      return [{ run, arrangement, cut, rows, answer: spacingAnswer(rows, run, arrangement) }];
+    }),
+  );
+  const notCompared: NotCompared[] = [
+    ...(asked.length === 0 ? [{ run, why: 'fixed by numbers' } as const] : []),
+    ...impossible.map((arrangement) => ({ run, why: 'no slotted fastener', arrangement }) as const),
+    ...question.cuts.flatMap((cut) => tooFew(run, cut, question.spacings)),
+  ];
+  return { cases, notCompared };
+}
+
+/** A row for each spacing at which there can be pieces; spacings that come to one number of fasteners are screened once. */
+function rowsOf(
+  spacings: readonly number[],
+  piecesAt: (spacing: number) => EvenPieces | null,
+  screened: (even: EvenPieces, asked: number) => SpacingRow,
+): SpacingRow[] {
+  const rows: SpacingRow[] = [];
+  for (const asked of spacings) {
+    const even = piecesAt(asked);
+    if (even === null) continue;
+    const alike = rows.find(({ count }) => count === even.count);
+    rows.push(alike ? { ...alike, asked } : screened(even, asked));
+  }
+  return rows;
+}
+
+function tooFew(run: Run, cut: Cut, asked: readonly number[]): NotCompared[] {
+  const spacings = asked.filter((one) => evenPieces(run, one, 'all', cut) === null);
+  if (spacings.length === 0) return [];
+  return [{ run, why: 'too few fasteners for the pieces', cut, spacings }];
 }
