@@ -3,14 +3,16 @@ import type { UnitSystem } from '../units.ts';
 import { shortNumber } from './number-text.ts';
 import { inUnits, unitOf, type Written } from './quantity.ts';
 
+type Named = Pick<Connection, 'run' | 'number'>;
+
 /** A connection's name, such as `R1/3`. */
-export function connectionName({ run, number }: Connection): string {
+export function connectionName({ run, number }: Named): string {
   return `${run}/${number}`;
 }
 
 /** Connections of one run, neighbours drawn together: `R1/1, R1/4 to R1/9`. */
-export function connectionNames(connections: readonly Connection[]): string {
-  const groups: [Connection, Connection][] = [];
+export function connectionNames(connections: readonly Named[]): string {
+  const groups: [Named, Named][] = [];
   for (const connection of connections) {
     const last = groups.at(-1);
     if (last !== undefined && connection.number === last[1].number + 1) last[1] = connection;

@@ -27,7 +27,7 @@ function row(run: RunResult, units: UnitSystem): string[] {
   return [
     run.run.id,
     String(run.connections.length),
-    runFails(run) ? 'fails' : 'ok',
+    verdict(run),
     governing?.utilisation == null ? '' : governing.utilisation.toFixed(2),
     governing?.check ?? 'nothing to check',
     governing === null
@@ -36,6 +36,21 @@ function row(run: RunResult, units: UnitSystem): string[] {
     life(run),
   ];
 }
+
+/** Whether the run passes as it stands in the job, and what its remedy is. */
+function verdict(run: RunResult): string {
+  const { remedy } = run;
+  if (remedy === null) return runFails(run) ? 'fails' : 'ok';
+  const word = REMEDY_WORDS[remedy.kind];
+  return runFails(run) ? `fails: ${word}` : word;
+}
+
+const REMEDY_WORDS = {
+  slots: 'slot',
+  joints: 'joint',
+  spacing: 'closer',
+  rework: 'rework',
+} as const;
 
 /** The shortest life, and the days that it was scaled from where the record is no whole year. */
 function life({ connections, coveredHours }: RunResult): string {

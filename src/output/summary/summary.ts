@@ -1,4 +1,4 @@
-import type { Result } from '../../model.ts';
+import type { Result, RunResult } from '../../model.ts';
 import { shortSeason } from '../../temperature/short-season.ts';
 import { connectionName } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
@@ -11,6 +11,7 @@ import { derivedLines } from './derived-lines.ts';
 import { foundLines } from './found-lines.ts';
 import { CAUTION, notes, warnings } from './notes.ts';
 import { recordLines } from './record-lines.ts';
+import { remedyAssumptions, remedyLines } from './remedy-lines.ts';
 import { runTable } from './run-table.ts';
 import { sunLines } from './sun-lines.ts';
 import { wrap } from './text-layout.ts';
@@ -30,6 +31,7 @@ export function summary(result: Result): string {
   const sections = [
     [job.title, '', wrap(answer(result))].join('\n'),
     runTable(result),
+    section('What to do', remedyLines(result)),
     section('What fails', failures(result)),
     section('Not given, so neither passed nor failed', notGiven(result)),
     section('Not owed, by the rule on the shear range', exempt(result)),
@@ -39,6 +41,7 @@ export function summary(result: Result): string {
     section('Year by year', yearTable(result)),
     section(warmingTitle(job), warmingTable(result)),
     section('Zones reckoned from sun and air', sunLines(job)),
+    section('What the remedies assume', remedyAssumptions(result)),
     section('To bear in mind', notes(result)),
     section('Found in the record', foundLines(job)),
     section('Warnings', warnings(result)),
@@ -56,7 +59,16 @@ function answer(result: Result): string {
     failing === 0
       ? `No check fails in ${runs.length === 1 ? 'the run' : `the ${runs.length} runs`}.`
       : `${failing} of ${runs.length} ${runs.length === 1 ? 'run' : 'runs'} ${failing === 1 ? 'fails' : 'fail'}.`;
-  return `${verdict} ${governs(result)}`.trimEnd();
+  return [verdict, remedied(runs), governs(result)].filter((text) => text !== '').join(' ');
+}
+
+/** How many failing runs have a remedy, and which have none; blank where none was looked for. */
+function remedied(runs: readonly RunResult[]): string {
+  const found = runs.filter(({ remedy }) => remedy !== null && remedy.kind !== 'rework').length;
+  const open = runs.filter(({ remedy }) => remedy?.kind === 'rework').map(({ run }) => run.id);
+  const passes = found === 0 ? '' : `A changed drawing passes for ${found}, see below.`;
+  const rest = open.length === 0 ? '' : `${open.join(', ')} must be reworked.`;
+  return `${passes} ${rest}`.trim();
 }
 
 function governs({ runs, governing }: Result): string {
