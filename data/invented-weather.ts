@@ -147,8 +147,8 @@ export function stretch(
   values: readonly number[],
   [low, high]: readonly [number, number],
 ): number[] {
-  const least = Math.min(...values);
-  const scale = (high - low) / (Math.max(...values) - least);
+  const least = values.reduce((a, b) => Math.min(a, b));
+  const scale = (high - low) / (values.reduce((a, b) => Math.max(a, b)) - least);
   return values.map((v) => low + scale * (v - least));
 }
 
