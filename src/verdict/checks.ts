@@ -125,11 +125,14 @@ function yieldRangeCheck({ stressRange }: ConnectionDemands, member: Member): Ch
   return compare('yield range', 'MPa', stressRange, limit);
 }
 
+/** Slip stops at the end of the slot, so a bolt that got there fails whatever its slip comes to. */
 function slotTravelCheck(demands: ConnectionDemands, fastener: Fastener): Check | null {
   if (demands.role !== 'slotted') return null;
   const { value, when } = demands.slip;
   const travel = { value: value + demands.settingTolerance, when };
-  return compare('slot travel', 'mm', travel, fastener.freePlay);
+  const check = compare('slot travel', 'mm', travel, fastener.freePlay);
+  const bears = value >= fastener.freePlay * (1 - ROUNDING);
+  return bears ? { ...check, status: 'fail' } : check;
 }
 
 function bucklingCheck({ compression }: ConnectionDemands, limits: Limits): Check | null {

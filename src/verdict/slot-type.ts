@@ -28,13 +28,13 @@ export function longestTravel({ longestTravel, slotTravels }: RemedySettings): n
  */
 export function drawnTravel(needed: number, settings: RemedySettings): number | null {
   const { slotTravels, slotStep } = settings;
-  // a slip that is a whole step but for rounding needs no more than that step
-  const enough = (travel: number) => travel >= needed * (1 - 1e-9);
+  // a bolt that just reaches the end of its slot bears there, so the slot is longer than what is needed
+  const enough = (travel: number) => travel > needed * (1 + 1e-9);
   const longest = longestTravel(settings);
   if (slotTravels !== null) {
     return slotTravels.find((travel) => enough(travel) && travel <= longest) ?? null;
   }
-  const steps = Math.max(1, Math.ceil((needed / slotStep) * (1 - 1e-9)));
+  const steps = Math.floor((needed / slotStep) * (1 + 1e-9)) + 1;
   // in whole thousandths, so that 3 × 0.1 mm is written 0.3 mm
   const travel = Math.round(steps * slotStep * 1000) / 1000;
   return travel <= longest ? travel : null;

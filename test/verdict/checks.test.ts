@@ -103,6 +103,11 @@ describe('checks of a connection', () => {
     expect(check('shear range', { shearRange: { value: 5001, when: '' } })?.status).toBe('fail');
   });
 
+  it('fails a bolt at the end of its slot, where slip can go no further', () => {
+    const there = { slip: { value: 9, when: '' }, settingTolerance: 0 };
+    expect(check('slot travel', there)).toMatchObject({ utilisation: 1, status: 'fail' });
+  });
+
   it('governs by the largest utilisation, the earlier check on a tie, what is not given never', () => {
     const checks = checksOf(DEMANDS, FASTENER, MEMBER, LIMITS);
     expect(governingCheck(checks)?.check).toBe('slot travel');
