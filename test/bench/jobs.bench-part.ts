@@ -1,0 +1,49 @@
+import { spawnSync } from 'node:child_process';
+import { mkdtempSync, rmSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import { fileURLToPath } from 'node:url';
+import { type BenchRow, inTurns } from './in-turns.ts';
+
+/** The repository's root, from where the bundled bench stands. */
+const ROOT = fileURLToPath(new URL('..', import.meta.url));
+
+/** Whole commands, each in a process of its own, against a Node that does nothing. */
+export function jobsBench(): BenchRow[] {
+  const out = mkdtempSync(join(tmpdir(), 'daystrain-bench-'));
+  const screen = (job: string, ...options: string[]) => {
+    return () =>
+      run('dist/cli.js', 'screen', job, '--out', join(out, options.join('')), ...options);
+  };
+  const one = 'test/jobs/one-run';
+  const example = 'examples/skerry-landing';
+  const rows = inTurns(
+    () => run('-e', '0'),
+    [
+      {
+        name: 'a one-run job of a year, without charts',
+        goal: 4,
+        run: screen(one, '--charts', 'none'),
+      },
+      {
+        name: 'the example without charts and remedies',
+        goal: 6,
+        run: screen(example, '--charts', 'none', '--no-remedies'),
+      },
+      { name: 'the example without charts', goal: null, run: screen(example, '--charts', 'none') },
+      { name: 'the one-run job with its four charts', goal: null, run: screen(one) },
+    ],
+  );
+  rmSync(out, { recursive: true });
+  const [plain, , , charts] = rows;
+  const each = { name: 'each PNG more', goal: 1.5, ratio: (charts.ratio - plain.ratio) / CHARTS };
+  return [...rows, { ...each, milliseconds: (charts.milliseconds - plain.milliseconds) / CHARTS }];
+}
+
+/** Charts of a job by default. */
+const CHARTS = 4;
+
+function run(...args: string[]): void {
+  const { status, stderr } = spawnSync(process.execPath, args, { cwd: ROOT, encoding: 'utf8' });
+  if (status !== 0) throw new Error(stderr);
+}
