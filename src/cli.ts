@@ -72,6 +72,7 @@ function commands(report: (outcome: CommandOutcome, strict: boolean) => void): C
         .choices(['governing', 'all', 'none'])
         .default('governing'),
     )
+    .option('--no-remedies', 'look for no remedies where a run fails')
     .option('--strict', 'exit with 1 if any check fails')
     .action(async (job: string, options: ScreenOptions & { strict?: boolean }) => {
       const { screenCommand } = await import('./commands/screen.ts');

@@ -5,6 +5,7 @@ import { checksCsv } from '../output/checks-csv.ts';
 import { cyclesCsv } from '../output/cycles-csv.ts';
 import { manifestJson } from '../output/manifest-json.ts';
 import { recordCsv } from '../output/record-csv.ts';
+import { remediesCsv } from '../output/remedies-csv.ts';
 import { resultsCsv } from '../output/results-csv.ts';
 import { runFails } from '../output/run-fails.ts';
 import { summary } from '../output/summary/summary.ts';
@@ -20,6 +21,8 @@ export interface ScreenOptions {
   /** Folder for the results; by default one under `reports/` with the job's name. */
   readonly out?: string;
   readonly charts: ChartChoice;
+  /** Whether remedies are looked for where a run fails; default true. */
+  readonly remedies?: boolean;
 }
 
 /** What a command has to say, for the entry point to print. */
@@ -41,7 +44,7 @@ export async function screenCommand(
   options: ScreenOptions,
 ): Promise<CommandOutcome> {
   const job = await readJob(jobPath);
-  const result = screen(job);
+  const result = screen(job, { remedies: options.remedies ?? true });
   const text = summary(result);
   const directory = options.out ?? (await reportDirectory(jobPath));
   const files = await write(result, text, directory, options.charts);
@@ -64,6 +67,7 @@ async function write(
     { name: 'checks.csv', content: checksCsv(result) },
     { name: 'cycles.csv', content: cyclesCsv(result) },
     { name: 'record.csv', content: recordCsv(result.job) },
+    ...present('remedies.csv', remediesCsv(result)),
     ...present('years.csv', yearsCsv(result)),
     ...present('warming.csv', warmingCsv(result)),
     ...(await drawCharts(result, charts)),
