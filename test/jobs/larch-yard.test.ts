@@ -6,14 +6,17 @@ import { inventedStation } from '../../data/invented-station.ts';
 import { STATION } from '../../data/places.ts';
 import { readJob } from '../../src/input/job.ts';
 import type { Job, Result } from '../../src/model.ts';
+import { shortestLife } from '../../src/output/life-text.ts';
 import { summary } from '../../src/output/summary/summary.ts';
 import { temperaturesText } from '../../src/output/temperatures-text.ts';
 import { daysCsv, temperaturesCsv } from '../../src/output/zones-csv.ts';
+import { ABSORPTANCES } from '../../src/temperature/absorptance.ts';
 import { screen } from '../../src/verdict/screen.ts';
 import { zoneFacts } from '../../src/verdict/zone-facts.ts';
 
 /** The example of dark and light rails facing four ways, whole. */
 const FOLDER = fileURLToPath(new URL('../../examples/larch-yard', import.meta.url));
+const README = readFileSync(new URL('../../README.md', import.meta.url), 'utf8');
 let job: Job;
 let result: Result;
 
@@ -74,6 +77,18 @@ describe('colour and orientation', () => {
     expect(life('DW')).toBeLessThan(50);
     expect(life('DN')).toBeGreaterThan(10 * life('DS'));
     for (const face of 'NESW') expect(life(`L${face}`)).toBeGreaterThan(2 * life(`D${face}`));
+  });
+
+  it('stand in the README as they come out', () => {
+    const lives = (id: string) =>
+      shortestLife(result.runs.find(({ run }) => run.id === id)!.connections);
+    for (const face of FACES) {
+      const id = face[0].toUpperCase();
+      expect(README).toContain(`| ${face} | ${lives(`D${id}`)} | ${lives(`L${id}`)} |`);
+    }
+    for (const [name, { absorptance, source }] of Object.entries(ABSORPTANCES)) {
+      expect(README).toContain(`| \`${name}\` | ${absorptance} | ${source} |`);
+    }
   });
 
   it('are said in the summary', () => {
