@@ -913,6 +913,13 @@ export const RUN_KEYS = {
     meaning:
       'Free member beyond the end fasteners; where positions start after 0, they give the left one.',
   },
+  left_overhang: {
+    ...LENGTH,
+    from: 0,
+    needs: '`overhang`, or the first of `positions`, where not given',
+    example: '0 mm',
+    meaning: 'Free member beyond the first fastener, where it is another than beyond the last.',
+  },
   lock_in: {
     kind: 'temperature or time',
     from: COLDEST,

@@ -63,9 +63,9 @@ function readRun(row: SourceMap, parts: RunParts, findings: Findings): Run | nul
 }
 
 /** `positions` are measured from the member's left end, so the first of them is the overhang there unless it is 0. */
-function overhangsOf({ overhang, positions }: RunValues): Overhangs {
+function overhangsOf({ left_overhang: left, overhang, positions }: RunValues): Overhangs {
   const first = positions?.[0] ?? 0;
-  return { left: first > 0 ? first : overhang, right: overhang };
+  return { left: left ?? (first > 0 ? first : overhang), right: overhang };
 }
 
 /** A temperature read where the record has a long gap is a guess. */
