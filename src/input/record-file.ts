@@ -19,7 +19,7 @@ import type { RepeatedFaults } from './repeated-faults.ts';
 import { cutRows, OpenQuoteError, type TakeRow } from './row-blocks.ts';
 import { type Encoding, EncodingError, encodingOf, textBlocks } from './text-blocks.ts';
 import type { ValueBounds } from './value-bounds.ts';
-import { type DateOrder, orderSaidBy, readTimeNumber, readWrittenTime } from './written-time.ts';
+import { type DateOrder, orderSaidBy, readTimeNumber, writtenTimeReader } from './written-time.ts';
 
 /** A file of the record, opened. */
 export interface RecordFile {
@@ -242,7 +242,7 @@ function timeReader(
   { timeNumbers }: RecordForm,
 ): (text: string) => WrittenTime | null {
   if (timeNumbers !== null) return (text) => readTimeNumber(toNumber(text), timeNumbers);
-  return (text) => readWrittenTime(text, order);
+  return writtenTimeReader(order);
 }
 
 function timeText(cells: readonly string[], time: readonly RecordColumn[]): string {
@@ -305,8 +305,9 @@ function missingMark(
   const numbers = new Set(
     marks.flatMap((mark) => [toNumber(mark), Number(mark)]).filter((n) => !Number.isNaN(n)),
   );
+  const some = numbers.size > 0;
   return (text, number) =>
-    Number.isNaN(number) ? words.has(text.trim().toLowerCase()) : numbers.has(number);
+    Number.isNaN(number) ? words.has(text.trim().toLowerCase()) : some && numbers.has(number);
 }
 
 /** Hands the data rows of a file on; a fault of the text itself is reported. */

@@ -45,17 +45,50 @@ export async function cutRows(
 
 /** Hands on the rows of a text that holds whole rows only; the line behind it, or `null` for no more. */
 function takeAll(text: string, separator: string, first: number, take: TakeRow): number | null {
-  const quoted = text.includes('"');
   // Without a quote, line ends and separators are all there is to it, and cutting there is far faster.
-  const rows = quoted ? parseRows(text, separator, first) : text.split('\n');
+  const takeRows = text.includes('"') ? takeQuoted : takePlain;
+  return takeRows(text, separator, first, take);
+}
+
+function takePlain(text: string, separator: string, first: number, take: TakeRow): number | null {
   let line = first;
-  for (const row of rows) {
-    const cells = typeof row === 'string' ? (row === '' ? [] : row.split(separator)) : row;
-    if (cells.some((cell) => cell !== '') && !take(cells, line)) return null;
-    line += quoted ? 1 + linesIn(cells.join('')) : 1;
+  for (let start = 0; start < text.length; line++) {
+    const found = text.indexOf('\n', start);
+    const end = found < 0 ? text.length : found;
+    if (end > start && !takeUnlessBlank(cutPlain(text, separator, start, end), line, take)) {
+      return null;
+    }
+    start = end + 1;
   }
-  // What follows the last line end is no line yet.
-  return text.endsWith('\n') && !quoted ? line - 1 : line;
+  return line;
+}
+
+function cutPlain(text: string, separator: string, start: number, end: number): string[] {
+  const cells: string[] = [];
+  let from = start;
+  for (;;) {
+    const at = text.indexOf(separator, from);
+    if (at < 0 || at >= end) break;
+    cells.push(text.slice(from, at));
+    from = at + 1;
+  }
+  cells.push(text.slice(from, end));
+  return cells;
+}
+
+function takeQuoted(text: string, separator: string, first: number, take: TakeRow): number | null {
+  let line = first;
+  for (const cells of parseRows(text, separator, first)) {
+    if (!takeUnlessBlank(cells, line, take)) return null;
+    // A line end inside quotes makes a row longer than a line.
+    line += 1 + linesIn(cells.join(''));
+  }
+  return line;
+}
+
+function takeUnlessBlank(cells: readonly string[], line: number, take: TakeRow): boolean {
+  for (const cell of cells) if (cell !== '') return take(cells, line);
+  return true;
 }
 
 function parseRows(text: string, separator: string, line: number): string[][] {

@@ -16,16 +16,28 @@ const MONTH_NAMES =
   /^(?:jan(?:uary)?|feb(?:ruary)?|mar(?:ch)?|apr(?:il)?|may|june?|july?|aug(?:ust)?|sept?(?:ember)?|oct(?:ober)?|nov(?:ember)?|dec(?:ember)?)$/;
 
 /**
- * Reads a date and time as loggers and spreadsheets write them: the date in figures or with an English month,
- * the time by a clock of 24 or of 12 hours, with an offset if wished. A date alone is its midnight.
+ * A reader of dates and times as loggers and spreadsheets write them: the date in figures or with an English month,
+ * the time by a clock of 24 or of 12 hours, with an offset if wished. A date alone is its midnight. The reader gives
+ * `null` where the text is none, leaves its order open, or names a day or hour that there is not.
  *
- * @param text date and time, with a space between them
  * @param order of day, month and year where the text leaves it open
- * @returns the time, or `null` where the text is none, leaves it open, or names a day or hour that there is not
  */
-export function readWrittenTime(text: string, order: DateOrder | null): WrittenTime | null {
-  const iso = text[10] === ' ' ? `${text.slice(0, 10)}T${text.slice(11)}` : text;
-  return readIsoTime(iso) ?? readParts(text.trim().toLowerCase(), order);
+export function writtenTimeReader(order: DateOrder | null): (text: string) => WrittenTime | null {
+  let day = { text: '', midnight: 0 };
+  return (text) => {
+    const iso = text[10] === ' ' ? `${text.slice(0, 10)}T${text.slice(11)}` : text;
+    const plain = readIsoTime(iso);
+    if (plain !== null) return plain;
+    // Neighbouring rows are of the same day mostly, and a clock alone is read far faster.
+    const space = text.indexOf(' ');
+    if (space === day.text.length && space > 0 && text.startsWith(day.text)) {
+      return withClock(day.midnight, text.slice(space).trim().toLowerCase());
+    }
+    const time = readParts(text.trim().toLowerCase(), order);
+    const date = space > 0 ? readParts(text.slice(0, space).toLowerCase(), order) : null;
+    if (date !== null) day = { text: text.slice(0, space), midnight: date.local };
+    return time;
+  };
 }
 
 /**
@@ -60,8 +72,11 @@ function readParts(text: string, order: DateOrder | null): WrittenTime | null {
   const date = COMPACT.exec(text) ?? DATE.exec(text);
   if (date === null) return null;
   const midnight = midnightOf(date.slice(1, 4), order);
-  const clock = text.slice(date[0].length).trim();
-  if (midnight === null) return null;
+  return midnight === null ? null : withClock(midnight, text.slice(date[0].length).trim());
+}
+
+/** The time at a clock's reading on a day that begins at midnight [ms]. */
+function withClock(midnight: number, clock: string): WrittenTime | null {
   if (clock === '') return { local: midnight, offset: null };
   const match = CLOCK.exec(clock);
   if (match === null) return null;
