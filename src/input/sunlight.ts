@@ -24,11 +24,11 @@ export interface ZoneSource {
 export function readSunlight(values: ZoneValues, source: ZoneSource): LightBasis | null {
   const { basis } = source;
   const sun = readSun(values, source);
+  const overhang = readOverhang(values.overhang, source.findings);
+  const horizon = readHorizon(values.horizon, source.findings);
   if (sun === null) return null;
   if (sun.on_surface !== null) return readSurfaceLight(sun.on_surface, source);
   const faces = readFaces(values, source);
-  const overhang = readOverhang(values.overhang, source.findings);
-  const horizon = readHorizon(values.horizon, source.findings);
   const place = basis === null ? null : placeInSky(basis, source);
   if (faces === null || horizon === null || place === null) return null;
   const { global, direct, diffuse } = sun;

@@ -1,3 +1,4 @@
+import { shortSeason } from '../temperature/short-season.ts';
 import type { SpacingComparison } from '../verdict/spacings.ts';
 import { shortNumber } from './number-text.ts';
 import { caseText, lengthText } from './spacings-words.ts';
@@ -37,14 +38,14 @@ function walking({ cases, job: { units } }: SpacingComparison): string[] {
   });
 }
 
-/** Under this many covered days a record is not called a whole year. */
-const WHOLE_YEAR_DAYS = 350;
-
 function record({ cases, job }: SpacingComparison): string[] {
-  const days = Math.min(...cases.map(({ rows }) => rows[0].coveredHours)) / 24;
-  const covers = `The record covers ${shortNumber(days)} days: the rest of the year is taken to be alike.`;
+  const days = shortSeason(Math.min(...cases.map(({ rows }) => rows[0].coveredHours)));
   return [
-    ...(days < WHOLE_YEAR_DAYS ? [covers] : []),
+    ...(days === null
+      ? []
+      : [
+          `The record covers ${shortNumber(days)} days: damage a year and lives are scaled from them, and the rest of the year is taken to be alike.`,
+        ]),
     ...(job.extremes.length === 0
       ? ['No extremes were given: peak forces and slips are those of this record alone.']
       : []),

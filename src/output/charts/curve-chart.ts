@@ -1,4 +1,5 @@
 import type { Job, RunResult } from '../../model.ts';
+import { shortSeason } from '../../temperature/short-season.ts';
 import { connectionName } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
 import type { Chart } from './chart.ts';
@@ -120,7 +121,7 @@ function title(result: RunResult, parts: readonly CurvePart[], job: Job): string
   const sums = parts.filter(({ curve }) => curve !== null);
   if (sums.length === 0) return `${name}: no curve was given, so damage is not judged`;
   const text = sums.map(({ part, damage }) => `${part} ${shortNumber((damage.sum ?? 0) * lives)}`);
-  return `${name}: damage in ${years(job)}: ${text.join(', ')} (allowed ${shortNumber(job.limits.damage)})`;
+  return `${name}: damage in ${years(job)}: ${text.join(', ')} (allowed ${shortNumber(job.limits.damage)})${scaled(result)}`;
 }
 
 function subtitle(parts: readonly CurvePart[], job: Job): string {
@@ -129,6 +130,12 @@ function subtitle(parts: readonly CurvePart[], job: Job): string {
     return `Each point: a bin of counted ranges and its cycles in ${years(job)}.`;
   const missing = without.length === 0 ? '' : ` No curve was given for the ${without[0]}.`;
   return `Each point: a bin of counted ranges and its cycles in ${years(job)}; filled where it does damage.${missing}`;
+}
+
+/** The days that the damage was scaled from where the record is no whole year. */
+function scaled({ coveredHours }: RunResult): string {
+  const days = shortSeason(coveredHours);
+  return days === null ? '' : `, scaled from ${shortNumber(days)} days`;
 }
 
 function years({ limits }: Job): string {
