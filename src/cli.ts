@@ -72,7 +72,15 @@ function commands(report: (outcome: CommandOutcome, strict: boolean) => void): C
         .choices(['governing', 'all', 'none'])
         .default('governing'),
     )
-    .option('--no-remedies', 'look for no remedies where a run fails')
+    .option(
+      '--write-remedied <file>',
+      'write the job with its remedies in to a job file of its own',
+    )
+    .addOption(
+      new Option('--no-remedies', 'look for no remedies where a run fails').conflicts(
+        'writeRemedied',
+      ),
+    )
     .option('--strict', 'exit with 1 if any check fails')
     .action(async (job: string, options: ScreenOptions & { strict?: boolean }) => {
       const { screenCommand } = await import('./commands/screen.ts');

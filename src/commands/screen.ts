@@ -1,3 +1,4 @@
+import { readFile } from 'node:fs/promises';
 import { readJob } from '../input/job.ts';
 import type { Result } from '../model.ts';
 import type { ChartChoice } from '../output/charts/choose-charts.ts';
@@ -5,6 +6,8 @@ import { checksCsv } from '../output/checks-csv.ts';
 import { cyclesCsv } from '../output/cycles-csv.ts';
 import { manifestJson } from '../output/manifest-json.ts';
 import { recordCsv } from '../output/record-csv.ts';
+import { remediedJobYaml } from '../output/remedied-job/remedied-job-yaml.ts';
+import { type StagedFile, stageFile } from '../output/remedied-job/stage-file.ts';
 import { remediesCsv } from '../output/remedies-csv.ts';
 import { resultsCsv } from '../output/results-csv.ts';
 import { runFails } from '../output/run-fails.ts';
@@ -14,6 +17,7 @@ import { MANIFEST, type OutputFile } from '../output/write-files.ts';
 import { yearsCsv } from '../output/years-csv.ts';
 import { screen } from '../verdict/screen.ts';
 import { filesText } from './files-text.ts';
+import { type RemediedTarget, remediedTarget } from './remedied-target.ts';
 import { reportDirectory } from './report-directory.ts';
 import { writeResults } from './write-results.ts';
 
@@ -23,6 +27,8 @@ export interface ScreenOptions {
   readonly charts: ChartChoice;
   /** Whether remedies are looked for where a run fails; default true. */
   readonly remedies?: boolean;
+  /** A job file to write the job to with its remedies in. */
+  readonly writeRemedied?: string;
 }
 
 /** What a command has to say, for the entry point to print. */
@@ -44,15 +50,29 @@ export async function screenCommand(
   options: ScreenOptions,
 ): Promise<CommandOutcome> {
   const job = await readJob(jobPath);
+  const { writeRemedied } = options;
+  const target =
+    writeRemedied === undefined ? null : await remediedTarget(writeRemedied, jobPath, job);
   const result = screen(job, { remedies: options.remedies ?? true });
   const text = summary(result);
   const directory = options.out ?? (await reportDirectory(jobPath));
-  const files = await write(result, text, directory, options.charts);
+  const staged = target && (await stageRemedied(result, target));
+  const files = await write(result, text, directory, options.charts).catch(async (error) => {
+    await staged?.discard();
+    throw error;
+  });
+  await staged?.place();
+  const remediedLine = target === null ? [] : [`The job with its remedies in: ${target.path}`];
   return {
-    lines: [text, `Results in ${directory}: ${filesText(files)}`],
+    lines: [text, `Results in ${directory}: ${filesText(files)}`, ...remediedLine],
     warnings: job.warnings,
     fails: result.runs.some(runFails),
   };
+}
+
+async function stageRemedied(result: Result, target: RemediedTarget): Promise<StagedFile> {
+  const text = await readFile(target.jobFile, 'utf8');
+  return stageFile(target.path, remediedJobYaml(result, text, target.relocate));
 }
 
 async function write(
