@@ -1,11 +1,14 @@
 import type { Curve, Fastener, Job, Member, Zone } from '../model.ts';
 import { resultUnit, type UnitSystem } from '../units.ts';
-import { amount, stamp } from './names.ts';
-import { grouped, shortNumber } from './number-text.ts';
+import { amount } from './names.ts';
+import { shortNumber } from './number-text.ts';
 import { DRAWING_LEGEND, runDrawing } from './run-drawing.ts';
 import { defaultLines } from './summary/default-lines.ts';
 import { derivedLines } from './summary/derived-lines.ts';
+import { spanText, weatherLine } from './summary/record-lines.ts';
+import { sunLines } from './summary/sun-lines.ts';
 import { bullet, table, wrap } from './summary/text-layout.ts';
+import { warmingTitle } from './summary/warming-table.ts';
 
 /**
  * What was understood of a job, in words: record, zones, members, fasteners, curves, runs, limits, extremes, and
@@ -17,8 +20,9 @@ export function understood(job: Job): string {
   const members = distinct(job.runs.map((run) => run.member));
   const fasteners = distinct(job.runs.flatMap((run) => run.fasteners));
   const sections = [
-    [job.title, '', recordText(job)].join('\n'),
+    [job.title, '', ...weatherLine(job), wrap(spanText(job))].join('\n'),
     section('Zones', [zoneTable(job)]),
+    section('Zones reckoned from sun and air', sunLines(job)),
     section(`Runs (${DRAWING_LEGEND})`, [runTable(job)]),
     section(
       'Members',
@@ -37,6 +41,7 @@ export function understood(job: Job): string {
       'Extremes',
       job.extremes.map((extreme) => bullet(extremeText(extreme, job))),
     ),
+    section(warmingTitle(job), job.warming === null ? [] : ['  Screened beside the job as it is.']),
     section('Worked out from other values', derivedLines(job)),
     section('Left at their defaults', defaultLines(job.defaults)),
   ];
@@ -49,13 +54,6 @@ function distinct<T>(items: readonly T[]): T[] {
 
 function section(title: string, lines: readonly string[]): string {
   return lines.length === 0 ? '' : [title, ...lines].join('\n');
-}
-
-function recordText({ axis: { times, stepHours } }: Job): string {
-  const [first, last] = [stamp(times[0]), stamp(times[times.length - 1])];
-  return wrap(
-    `Record: ${grouped(times.length)} samples, ${first} to ${last}, every ${shortNumber(stepHours)} h.`,
-  );
 }
 
 function zoneTable({ zones, units }: Job): string {
@@ -150,6 +148,7 @@ function limitsText({ limits, counting, represents }: Job): string {
       `allowed damage ${shortNumber(limits.damage)}`,
       `factors: load ${limits.loadFactor}, member ${limits.memberFactor}, fastener ${limits.fastenerFactor}, static ${limits.staticFactor}`,
       `residue ${counting.residue}`,
+      ...(counting.extremesCycle ? ['a cycle a year between the extremes'] : []),
       `a pass of the record stands for ${stands}`,
     ].join('; '),
     '  ',

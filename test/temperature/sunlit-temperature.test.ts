@@ -1,9 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import type { Stamp } from '../../src/model.ts';
 import { ABSORPTANCES } from '../../src/temperature/absorptance.ts';
 import { ASHRAE_FILM, filmFromWind } from '../../src/temperature/film-coefficient.ts';
 import { hiddenSun } from '../../src/temperature/shade.ts';
-import type { Stamp } from '../../src/model.ts';
 import { skyLoss } from '../../src/temperature/sky-loss.ts';
 import { solAirExcess } from '../../src/temperature/sol-air.ts';
 import { sunPath } from '../../src/temperature/sun-path.ts';
