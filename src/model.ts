@@ -428,6 +428,21 @@ export interface Job {
   readonly warnings: readonly string[];
 }
 
+/** The part of a job that its temperatures hang on. */
+export type ZonesJob = Pick<
+  Job,
+  | 'title'
+  | 'units'
+  | 'axis'
+  | 'zones'
+  | 'recordFindings'
+  | 'represents'
+  | 'weather'
+  | 'inputs'
+  | 'defaults'
+  | 'warnings'
+>;
+
 /** The checks of a connection in the order that breaks ties for the governing one. */
 export const CHECKS = [
   'member damage',
@@ -526,6 +541,12 @@ export interface Connection {
   readonly remedy: string;
 }
 
+/** Shares of a connection's damage that rest on gaps of the record, 0 … 1; `null` without a curve. */
+export interface FilledShare {
+  readonly fastener: number | null;
+  readonly member: number | null;
+}
+
 /** What to do at a connection; `fails` where no remedy was looked for. */
 export type Verdict = 'ok' | 'slot' | 'joint' | 'rework' | 'fails';
 
@@ -583,6 +604,8 @@ export interface RunResult {
    * once more. Empty for a record of one year or less.
    */
   readonly yearByYear: () => readonly YearDamage[];
+  /** For each connection, reckoned when first asked for: the record is passed through once more where it has gaps. */
+  readonly filledShares: () => readonly FilledShare[];
   /** `null` where the run passes, or where no remedy was looked for. */
   readonly remedy: Remedy | Rework | null;
 }

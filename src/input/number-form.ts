@@ -28,13 +28,18 @@ export function numberForm(
   given: NumberFormGiven,
 ): NumberForm | { readonly unclear: string } {
   let unclear: string | null = null;
+  let hasPoint = false;
   let decimal = given.decimal;
   let thousands = given.thousands;
   for (const sample of samples) {
     const text = plain(sample);
     if (!/^[+-]?\d[\d.,' ]*$/.test(text)) continue;
     const marks = text.replace(/[\d+-]/g, '');
-    if (marks === '' || marks === '.') continue;
+    if (marks === '') continue;
+    if (marks === '.') {
+      hasPoint ||= !/^[+-]?[1-9]\d{0,2}\.\d{3}$/.test(text);
+      continue;
+    }
     if (marks === ',') {
       if (/^[+-]?[1-9]\d{0,2},\d{3}$/.test(text)) unclear ??= sample.trim();
       else decimal ??= ',';
@@ -48,7 +53,10 @@ export function numberForm(
       if (marks.length > 1) thousands ??= first as NumberForm['thousands'];
     } else thousands ??= last as NumberForm['thousands'];
   }
-  if (unclear !== null && decimal === null && thousands === null) return { unclear };
+  if (unclear !== null && decimal === null && thousands === null) {
+    if (!hasPoint) return { unclear };
+    thousands = ',';
+  }
   if (decimal === null) decimal = thousands === '.' ? ',' : '.';
   return { decimal, thousands: thousands ?? '' };
 }

@@ -68,4 +68,12 @@ const COLUMNS: readonly Column[] = [
   { name: 'remedy', value: (c) => c.remedy },
   // blank where the record is a whole year
   { name: 'damage_scaled_from [days]', value: (_, run) => shortSeason(run.coveredHours) },
+  {
+    name: 'fastener_damage_filled_share',
+    value: (c, run) => run.filledShares()[c.number - 1].fastener,
+  },
+  {
+    name: 'member_damage_filled_share',
+    value: (c, run) => run.filledShares()[c.number - 1].member,
+  },
 ];

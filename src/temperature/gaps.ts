@@ -39,6 +39,11 @@ function missingHours(axis: StepAxis, from: number, to: number): number {
   return steps > LONG_STEP ? (Math.round(steps) - 1) * step : 0;
 }
 
+/** True where a row or more is missing between a sample and the one before it. */
+export function isRowMissingBefore(axis: RecordAxis, sample: number): boolean {
+  return missingHours(axis, sample - 1, sample) > 0;
+}
+
 /** True for a gap up to the limit; hours that are sums of steps may be off in the last digit. */
 function isShort(hours: number, fillUpTo: number): boolean {
   return hours <= fillUpTo * (1 + 1e-9);

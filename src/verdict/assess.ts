@@ -3,9 +3,10 @@ import { rangeBins } from '../damage/range-bins.ts';
 import type { Chain } from '../mechanics/chain.ts';
 import { followRecord, type History } from '../mechanics/history.ts';
 import { traceConnection } from '../mechanics/trace.ts';
-import type { Job, Run, RunResult, Trace, YearDamage } from '../model.ts';
+import type { FilledShare, Job, Run, RunResult, Trace, YearDamage } from '../model.ts';
 import { assessConnection, fastenerSpectrum, fastenerUse } from './connection.ts';
 import { extremesCycle } from './extremes-cycle.ts';
+import { filledShares } from './filled-shares.ts';
 import { governingConnection } from './governing-connection.ts';
 import { createPassCounters } from './pass-counters.ts';
 import { runChain } from './run-chain.ts';
@@ -19,7 +20,10 @@ const NOISE = 1e-9;
 
 /** A run's demands, checks and verdicts, without the bins and the trace that only tables and charts show. */
 export interface RunAssessment
-  extends Omit<RunResult, 'fastenerBins' | 'memberBins' | 'trace' | 'yearByYear' | 'remedy'> {
+  extends Omit<
+    RunResult,
+    'fastenerBins' | 'memberBins' | 'trace' | 'yearByYear' | 'filledShares' | 'remedy'
+  > {
   /** All that the record does to the run. */
   readonly history: History;
 }
@@ -38,6 +42,7 @@ export function assessRun(run: Run, job: Job, tables: DamageTables): RunResult {
   const { governing } = facts;
   let trace: Trace | null = null;
   let years: readonly YearDamage[] | null = null;
+  let shares: readonly FilledShare[] | null = null;
   return {
     ...facts,
     ...binsOf(scene, spans, governing),
@@ -49,6 +54,10 @@ export function assessRun(run: Run, job: Job, tables: DamageTables): RunResult {
     yearByYear: () => {
       years ??= yearByYear(scene, chain, record.path);
       return years;
+    },
+    filledShares: () => {
+      shares ??= filledShares(scene, spans, facts.connections, { chain, path: record.path });
+      return shares;
     },
   };
 }

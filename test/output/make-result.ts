@@ -238,6 +238,7 @@ function makeRunResult(recipe: RunRecipe, zones: readonly Zone[], axis: RecordAx
     remedy: null,
     extremesCycle: null,
     yearByYear: () => [],
+    filledShares: () => connections.map(() => ({ fastener: 0, member: 0 })),
     trace: () => ({
       shear: strain.map((e) => e * shear[governing]),
       spanForce: strain.map((e) => -e * shear[governing] * 1.7),

@@ -43,7 +43,7 @@ export function summary(result: Result): string {
     section('Zones reckoned from sun and air', sunLines(job)),
     section('What the remedies assume', remedyAssumptions(result)),
     section('To bear in mind', notes(result)),
-    section('Found in the record', foundLines(job)),
+    section('Found in the record', foundLines(result)),
     section('Warnings', warnings(result)),
     section('Worked out from other values', derivedLines(job)),
     section('Left at their defaults', defaultLines(job.defaults)),
