@@ -1,4 +1,5 @@
 export { readJob } from './input/job.ts';
+export { readZonesJob } from './input/zones-job.ts';
 export type { Issue, Place } from './issue.ts';
 export { InputError, wordIssue } from './issue.ts';
 export type * from './model.ts';

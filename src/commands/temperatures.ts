@@ -1,7 +1,7 @@
-import { readJob } from '../input/job.ts';
-import type { Job } from '../model.ts';
+import { readZonesJob } from '../input/zones-job.ts';
+import type { ZonesJob } from '../model.ts';
 import { fileStems } from '../output/file-stems.ts';
-import { manifestText } from '../output/manifest-json.ts';
+import { zonesManifest } from '../output/manifest-json.ts';
 import { temperaturesText } from '../output/temperatures-text.ts';
 import { MANIFEST, type OutputFile } from '../output/write-files.ts';
 import { daysCsv, temperaturesCsv } from '../output/zones-csv.ts';
@@ -19,16 +19,16 @@ export interface TemperaturesOptions {
 
 /**
  * `daystrain temperatures`: shows the zones of a job alone, with tables of every sample and day, a summary, charts and
- * manifest.
+ * manifest. The job needs a record and zones; the rest may still be missing.
  *
  * @param jobPath the job file, or a folder that holds job.yaml
- * @throws InputError with every issue of the job, or where the results cannot be written
+ * @throws InputError with every issue of record and zones, or where the results cannot be written
  */
 export async function temperaturesCommand(
   jobPath: string,
   options: TemperaturesOptions,
 ): Promise<CommandOutcome> {
-  const job = await readJob(jobPath);
+  const job = await readZonesJob(jobPath);
   const facts = job.zones
     .filter(({ constant }) => !constant)
     .map((zone) => zoneFacts(zone, job.axis, job.represents));
@@ -40,8 +40,7 @@ export async function temperaturesCommand(
     { name: 'days.csv', content: daysCsv(facts, job.units) },
     ...(options.charts === 'none' ? [] : await drawCharts(job, facts)),
   ];
-  const made = { zones: facts.map(({ zone }) => zone.name) };
-  await writeResults(directory, files, manifestText(job, made, files));
+  await writeResults(directory, files, zonesManifest(job, files));
   const names = [...files.map((file) => file.name), MANIFEST];
   return {
     lines: [text, `Results in ${directory}: ${filesText(names)}`],
@@ -51,7 +50,7 @@ export async function temperaturesCommand(
 }
 
 /** The canvas is loaded only where charts are wanted. */
-async function drawCharts(job: Job, facts: readonly ZoneFacts[]): Promise<OutputFile[]> {
+async function drawCharts(job: ZonesJob, facts: readonly ZoneFacts[]): Promise<OutputFile[]> {
   const { zoneChart } = await import('../output/charts/zone-chart.ts');
   const { daysChart } = await import('../output/charts/days-chart.ts');
   const { renderPngs } = await import('../output/png.ts');

@@ -27,7 +27,21 @@ import { readZones } from './zones.ts';
  * @returns the job in base units
  * @throws InputError with every issue of the job and its files
  */
-export async function readJob(path: string): Promise<Job> {
+export function readJob(path: string): Promise<Job> {
+  return readJobWith(path, readWhole);
+}
+
+/**
+ * Opens a job file and has it read.
+ *
+ * @param path the job file, or a folder that holds job.yaml
+ * @param read makes something of its mapping; `null` with a fault, which it reports
+ * @throws InputError with every issue of the job and its files
+ */
+export async function readJobWith<T>(
+  path: string,
+  read: (map: SourceMap, files: Files, findings: Findings) => Promise<T | null>,
+): Promise<T> {
   const found = await stat(path).catch(() => null);
   const jobFile = found?.isDirectory() ? join(path, 'job.yaml') : path;
   const name = basename(jobFile);
@@ -35,7 +49,7 @@ export async function readJob(path: string): Promise<Job> {
   const findings = noFindings();
   const text = await files.read(name, { file: jobFile }, findings);
   const map = text === null ? null : readYaml(text, name, findings);
-  const job = map === null ? null : await readWhole(map, files, findings);
+  const job = map === null ? null : await read(map, files, findings);
   if (job !== null && findings.issues.length === 0) return job;
   throw new InputError(inFileOrder(findings.issues, files));
 }

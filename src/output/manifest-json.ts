@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import type { Job, Result } from '../model.ts';
+import type { Job, Result, ZonesJob } from '../model.ts';
 import { version } from './version.ts';
 import type { OutputFile } from './write-files.ts';
 
@@ -27,13 +27,21 @@ export function manifestJson(result: Result, files: readonly OutputFile[]): stri
  * @param files the files that are written with it
  */
 export function manifestText(job: Job, made: object, files: readonly OutputFile[]): string {
+  return manifestOf(job, { settings: settings(job), ...made }, files);
+}
+
+/** The manifest of a command that looks at the zones alone. */
+export function zonesManifest(job: ZonesJob, files: readonly OutputFile[]): string {
+  return manifestOf(job, { settings: { ...zoneSettings(job), defaults: job.defaults } }, files);
+}
+
+function manifestOf(job: ZonesJob, made: object, files: readonly OutputFile[]): string {
   const manifest = {
     program: 'daystrain',
     version,
     title: job.title,
     units: job.units,
     inputs: job.inputs,
-    settings: settings(job),
     ...made,
     files: files.map(({ name, content }) => ({ name, sha256: sha256(content) })),
   };
@@ -53,18 +61,21 @@ function settings(job: Job) {
     force_gate_N: counting.forceGate,
     stress_gate_MPa: counting.stressGate,
     extremes_cycle: counting.extremesCycle,
-    represents_years: job.represents,
-    weather: job.weather,
+    ...zoneSettings(job),
     warming: job.warming,
-    sunlit_zones: Object.fromEntries(
-      job.zones.flatMap(({ name, sunlit }) => (sunlit === null ? [] : [[name, sunlit.basis]])),
-    ),
     extremes: job.extremes.map(({ name, temperatures }) => ({
       name,
       degC: Object.fromEntries(temperatures),
     })),
     defaults: job.defaults,
   };
+}
+
+function zoneSettings({ represents, weather, zones }: ZonesJob) {
+  const sunlit = zones.flatMap(({ name, sunlit }) =>
+    sunlit === null ? [] : [[name, sunlit.basis]],
+  );
+  return { represents_years: represents, weather, sunlit_zones: Object.fromEntries(sunlit) };
 }
 
 function sha256(content: string | Uint8Array): string {

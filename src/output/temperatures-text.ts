@@ -1,4 +1,4 @@
-import type { Job } from '../model.ts';
+import type { ZonesJob } from '../model.ts';
 import { shortSeason } from '../temperature/short-season.ts';
 import type { Moment, ZoneFacts } from '../verdict/zone-facts.ts';
 import { amount, stamp } from './names.ts';
@@ -17,7 +17,7 @@ import { swingTable } from './swing-table.ts';
  * @param facts of every zone that is not constant
  * @returns text of at most 100 columns in the units of the job, with LF line ends
  */
-export function temperaturesText(job: Job, facts: readonly ZoneFacts[]): string {
+export function temperaturesText(job: ZonesJob, facts: readonly ZoneFacts[]): string {
   const zoneDefaults = job.defaults.filter(({ key }) => /^(?:zones |record)/.test(key));
   const sections = [
     [`${job.title}: temperatures`, '', ...weatherLine(job), wrap(spanText(job))].join('\n'),
@@ -33,7 +33,7 @@ export function temperaturesText(job: Job, facts: readonly ZoneFacts[]): string 
   return `${sections.filter((text) => text !== '').join('\n\n')}\n`;
 }
 
-function extremesTable(facts: readonly ZoneFacts[], { units }: Job): string {
+function extremesTable(facts: readonly ZoneFacts[], { units }: ZonesJob): string {
   const degrees = (value: number) => amount(value, 'temperature', units);
   const rows = facts.map(({ zone, coldest, warmest, mean }) => [
     zone.name,
@@ -46,7 +46,7 @@ function extremesTable(facts: readonly ZoneFacts[], { units }: Job): string {
   return table([['zone', 'coldest', 'at', 'warmest', 'at', 'mean'], ...rows], [1, 3, 5]);
 }
 
-function dailyTable(facts: readonly ZoneFacts[], { units }: Job): string {
+function dailyTable(facts: readonly ZoneFacts[], { units }: ZonesJob): string {
   const swing = (value: number) => amount(value, 'temperature difference', units);
   const rows = facts.flatMap(({ zone, swings, largestSwing, days }) =>
     swings === null || largestSwing === null
@@ -67,7 +67,7 @@ function dailyTable(facts: readonly ZoneFacts[], { units }: Job): string {
   return rows.length === 0 ? '' : table([header, ...rows], [1, 2, 3, 4, 5]);
 }
 
-function gainTable(facts: readonly ZoneFacts[], { units }: Job): string[] {
+function gainTable(facts: readonly ZoneFacts[], { units }: ZonesJob): string[] {
   const kelvin = ({ value }: Pick<Moment, 'value'>) =>
     amount(value, 'temperature difference', units);
   const rows = facts.flatMap(({ zone, gain }) =>
@@ -91,7 +91,7 @@ function gainTable(facts: readonly ZoneFacts[], { units }: Job): string[] {
   return [table([header, ...rows], [1, 3, 4, 5, 6]), bullet(how)];
 }
 
-function notes(facts: readonly ZoneFacts[], { axis, zones }: Job): string[] {
+function notes(facts: readonly ZoneFacts[], { axis, zones }: ZonesJob): string[] {
   const gaps = facts
     .filter(({ filled, bridged }) => filled + bridged > 0)
     .map(({ zone, filled, bridged }) => {

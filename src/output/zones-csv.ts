@@ -1,5 +1,5 @@
 import { stringify } from 'csv-stringify/sync';
-import { BRIDGED, FILLED, type Job, type Zone } from '../model.ts';
+import { BRIDGED, FILLED, type Zone, type ZonesJob } from '../model.ts';
 import { type ResultUnit, resultUnit } from '../units.ts';
 import type { ZoneFacts } from '../verdict/zone-facts.ts';
 import { stamp } from './names.ts';
@@ -11,7 +11,7 @@ import { cellNumber } from './number-text.ts';
  *
  * @returns the CSV text with a header row and LF line ends
  */
-export function temperaturesCsv({ axis, zones, units }: Job): string {
+export function temperaturesCsv({ axis, zones, units }: ZonesJob): string {
   const columns = zones
     .filter(({ constant }) => !constant)
     .flatMap((zone) => columnsOf(zone, units));
@@ -27,7 +27,10 @@ interface Column {
   readonly cell: (sample: number) => string;
 }
 
-function columnsOf({ name, temperature, standing, sunlit }: Zone, units: Job['units']): Column[] {
+function columnsOf(
+  { name, temperature, standing, sunlit }: Zone,
+  units: ZonesJob['units'],
+): Column[] {
   const inUnit = (
     what: string,
     values: Float64Array,
@@ -64,7 +67,7 @@ function thousandths(value: number): string {
  *
  * @returns the CSV text with a header row and LF line ends
  */
-export function daysCsv(zones: readonly ZoneFacts[], units: Job['units']): string {
+export function daysCsv(zones: readonly ZoneFacts[], units: ZonesJob['units']): string {
   const degrees = resultUnit('temperature', units);
   const difference = resultUnit('temperature difference', units);
   const header = [

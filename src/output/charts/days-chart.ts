@@ -1,4 +1,4 @@
-import type { Job } from '../../model.ts';
+import type { ZonesJob } from '../../model.ts';
 import type { ZoneFacts } from '../../verdict/zone-facts.ts';
 import { amount, stamp } from '../names.ts';
 import { inUnits, unitOf } from '../quantity.ts';
@@ -12,7 +12,7 @@ const HOUR = 3_600_000;
  * Three days of a zone by the hour: the one with its warmest, the one with its coldest temperature, and the one of its
  * largest swing; the air of each beside it where the zone was reckoned from sun and air.
  */
-export function daysChart(facts: ZoneFacts, job: Job, name: string): Chart {
+export function daysChart(facts: ZoneFacts, job: ZonesJob, name: string): Chart {
   const { zone, warmest, coldest, largestSwing } = facts;
   const days = [
     { words: 'warmest day', at: warmest.time, colour: COLOUR.limit, dash: DASH.solid },
@@ -82,7 +82,7 @@ export function daysChart(facts: ZoneFacts, job: Job, name: string): Chart {
 }
 
 /** The samples of a day, by its hours. */
-function dayLine(values: Float64Array, { axis: { times }, units }: Job, day: number): Point[] {
+function dayLine(values: Float64Array, { axis: { times }, units }: ZonesJob, day: number): Point[] {
   const points: Point[] = [];
   for (let i = 0; i < times.length; i++) {
     if (times[i] < day || times[i] > day + DAY) continue;

@@ -1,4 +1,4 @@
-import type { Job } from '../../model.ts';
+import type { ZonesJob } from '../../model.ts';
 import type { ZoneFacts } from '../../verdict/zone-facts.ts';
 import { amount, stamp } from '../names.ts';
 import { inUnits, unitOf } from '../quantity.ts';
@@ -10,7 +10,7 @@ import { timeTicks } from './time-ticks.ts';
 const NOON = 43_200_000;
 
 /** A zone over the record: the band from each day's coldest to its warmest temperature, and below it the daily swing. */
-export function zoneChart(facts: ZoneFacts, job: Job, name: string): Chart {
+export function zoneChart(facts: ZoneFacts, job: ZonesJob, name: string): Chart {
   const { zone, days, coldest, warmest, largestSwing } = facts;
   const { times } = job.axis;
   const [from, to] = [times[0], times[times.length - 1]];

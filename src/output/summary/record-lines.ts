@@ -1,4 +1,4 @@
-import type { Job, Result } from '../../model.ts';
+import type { Result, ZonesJob } from '../../model.ts';
 import { runNames, stamp } from '../names.ts';
 import { grouped, shortNumber } from '../number-text.ts';
 import { wrap } from './text-layout.ts';
@@ -18,14 +18,14 @@ export function recordLines({ job, runs }: Result): string[] {
 }
 
 /** The record's samples, span and step. */
-export function spanText({ axis: { times, stepHours } }: Job): string {
+export function spanText({ axis: { times, stepHours } }: ZonesJob): string {
   const first = stamp(times[0]);
   const last = stamp(times[times.length - 1]);
   return `Record: ${grouped(times.length)} samples, ${first} to ${last}, every ${shortNumber(stepHours)} h.`;
 }
 
 /** The weather file that the record was read from; nothing for a CSV. */
-export function weatherLine({ weather }: Job): string[] {
+export function weatherLine({ weather }: ZonesJob): string[] {
   if (weather === null) return [];
   const { place, years, setOn } = weather;
   const [first, last] = years;

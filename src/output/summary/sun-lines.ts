@@ -1,4 +1,4 @@
-import type { Job, LightBasis, Site, Stamp, SunlitBasis } from '../../model.ts';
+import type { LightBasis, Site, Stamp, SunlitBasis, ZonesJob } from '../../model.ts';
 import { timeConstant } from '../../temperature/thermal-lag.ts';
 import type { UnitSystem } from '../../units.ts';
 import { amount } from '../names.ts';
@@ -8,7 +8,7 @@ import { bullet } from './text-layout.ts';
 /**
  * What the zones in the sun were reckoned from: first what they share, then what each has of its own.
  */
-export function sunLines({ zones, units }: Job): string[] {
+export function sunLines({ zones, units }: ZonesJob): string[] {
   const sunlit = zones.flatMap(({ name, sunlit }) =>
     sunlit === null ? [] : [{ name, parts: partsOf(sunlit.basis, units) }],
   );
