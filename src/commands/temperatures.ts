@@ -2,6 +2,7 @@ import { readZonesJob } from '../input/zones-job.ts';
 import type { ZonesJob } from '../model.ts';
 import { fileStems } from '../output/file-stems.ts';
 import { zonesManifest } from '../output/manifest-json.ts';
+import { recordCsv } from '../output/record-csv.ts';
 import { temperaturesText } from '../output/temperatures-text.ts';
 import { MANIFEST, type OutputFile } from '../output/write-files.ts';
 import { daysCsv, temperaturesCsv } from '../output/zones-csv.ts';
@@ -38,6 +39,7 @@ export async function temperaturesCommand(
     { name: 'summary.txt', content: text },
     { name: 'temperatures.csv', content: temperaturesCsv(job) },
     { name: 'days.csv', content: daysCsv(facts, job.units) },
+    { name: 'record.csv', content: recordCsv(job) },
     ...(options.charts === 'none' ? [] : await drawCharts(job, facts)),
   ];
   await writeResults(directory, files, zonesManifest(job, files));

@@ -1,5 +1,5 @@
 import { stringify } from 'csv-stringify/sync';
-import type { Job } from '../model.ts';
+import type { ZonesJob } from '../model.ts';
 import { stamp } from './names.ts';
 import { cellNumber } from './number-text.ts';
 import { inUnits, unitOf } from './quantity.ts';
@@ -10,7 +10,7 @@ import { inUnits, unitOf } from './quantity.ts';
  *
  * @returns the CSV text with a header row and LF line ends
  */
-export function recordCsv({ recordFindings, units }: Job): string {
+export function recordCsv({ recordFindings, units }: ZonesJob): string {
   const header = [
     'time',
     'channel',

@@ -5,6 +5,7 @@ import { amount, stamp } from './names.ts';
 import { grouped, shortNumber } from './number-text.ts';
 import { inUnits } from './quantity.ts';
 import { defaultLines } from './summary/default-lines.ts';
+import { findingCounts, ONE_BY_ONE } from './summary/found-lines.ts';
 import { spanText, weatherLine } from './summary/record-lines.ts';
 import { sunLines } from './summary/sun-lines.ts';
 import { bullet, table, wrap } from './summary/text-layout.ts';
@@ -27,6 +28,7 @@ export function temperaturesText(job: ZonesJob, facts: readonly ZoneFacts[]): st
     section('What the sun does', gainTable(facts, job)),
     section('Zones reckoned from sun and air', sunLines(job)),
     section('To bear in mind', notes(facts, job)),
+    section('Found in the record', foundInRecord(job)),
     section('Warnings', job.warnings.map(bullet)),
     section('Left at their defaults', defaultLines(zoneDefaults)),
   ];
@@ -108,6 +110,10 @@ function notes(facts: readonly ZoneFacts[], { axis, zones }: ZonesJob): string[]
   const constant = zones.filter((zone) => zone.constant).map(({ name }) => name);
   const still = constant.length === 0 ? [] : [`Constant, and not shown: ${constant.join(', ')}.`];
   return [...gaps, ...short, ...still].map(bullet);
+}
+
+function foundInRecord({ recordFindings }: ZonesJob): string[] {
+  return recordFindings.length === 0 ? [] : [...findingCounts(recordFindings), ONE_BY_ONE];
 }
 
 function section(title: string, lines: readonly string[]): string {

@@ -7,13 +7,20 @@ import { wrap } from './text-layout.ts';
 export function foundLines(result: Result): string[] {
   const { recordFindings } = result.job;
   if (recordFindings.length === 0) return [];
-  const lines = RECORD_FINDINGS.flatMap((kind) => {
-    const ofKind = recordFindings.filter((finding) => finding.kind === kind);
+  return [...findingCounts(recordFindings), ...damageOnGaps(result), ONE_BY_ONE];
+}
+
+/** Where the findings stand singly. */
+export const ONE_BY_ONE = '  One by one in record.csv.';
+
+/** The findings counted by kind and by what was done. */
+export function findingCounts(found: readonly RecordFinding[]): string[] {
+  return RECORD_FINDINGS.flatMap((kind) => {
+    const ofKind = found.filter((finding) => finding.kind === kind);
     return [...byWhatWasDone(ofKind)].map(([done, some]) =>
       wrap(`${kind}: ${grouped(some.length)}${lasting(some)}, ${done}`, '  - ', 4),
     );
   });
-  return [...lines, ...damageOnGaps(result), '  One by one in record.csv.'];
 }
 
 /** The connection whose damage rests most on gaps; nothing where the record has none. */
