@@ -4,6 +4,7 @@ import type { Chart as DrawnChart } from 'chart.js';
 import { ChartJSNodeCanvas } from 'chartjs-node-canvas';
 import type { Chart } from './charts/chart.ts';
 import { directLabels } from './charts/direct-labels.ts';
+import { drawingMarks } from './charts/drawing-marks.ts';
 import { fixedTicks } from './charts/fixed-ticks.ts';
 import { COLOUR, FONT, HEIGHT, WIDTH } from './charts/theme.ts';
 import { encodePng } from './encode-png.ts';
@@ -19,7 +20,7 @@ export function renderPngs(charts: readonly Chart[]): OutputFile[] {
     width: WIDTH,
     height: HEIGHT,
     backgroundColour: COLOUR.paper,
-    plugins: { modern: [fixedTicks, directLabels, quickEncoding] as never[] },
+    plugins: { modern: [fixedTicks, drawingMarks, directLabels, quickEncoding] as never[] },
   });
   return charts.map(({ name, configuration }) => ({
     name: `${name}.png`,

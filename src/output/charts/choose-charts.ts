@@ -2,10 +2,11 @@ import type { Result } from '../../model.ts';
 import { alongChart } from './along-chart.ts';
 import type { Chart } from './chart.ts';
 import { curveChart } from './curve-chart.ts';
+import { drawingChart } from './drawing-chart.ts';
 import { historyChart } from './history-chart.ts';
 import { overviewChart } from './overview-chart.ts';
 
-/** Which charts are drawn: of the governing run and an overview, of every run, or none. */
+/** Which charts are drawn: of the governing run, an overview and every remedy, of every run, or none. */
 export type ChartChoice = 'governing' | 'all' | 'none';
 
 /** The charts of a result that are wanted, the overview first. */
@@ -16,5 +17,9 @@ export function chooseCharts(result: Result, choice: ChartChoice): Chart[] {
   return [
     overviewChart(result),
     ...runs.flatMap((run) => [historyChart(run, job), curveChart(run, job), alongChart(run, job)]),
+    ...result.runs.flatMap((run) => {
+      const { remedy } = run;
+      return remedy === null || remedy.kind === 'rework' ? [] : [drawingChart(run, remedy, job)];
+    }),
   ];
 }

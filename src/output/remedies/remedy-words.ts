@@ -62,7 +62,7 @@ const CHANGED: Readonly<Record<SingleChange['quantity'], Written>> = {
 
 /** A length that is drawn, not rounded to what a person would say. */
 export function drawnLength(value: number, units: UnitSystem): string {
-  const number = Number(inUnits(value, 'length', units).toPrecision(6));
+  const number = Number(inUnits(value, 'length', units).toFixed(units === 'SI' ? 3 : 4));
   return `${number} ${unitOf('length', units)}`;
 }
 
