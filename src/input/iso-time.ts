@@ -22,7 +22,8 @@ export function readIsoTime(text: string): WrittenTime | null {
   const hour = digits(text, 11, 13);
   const minute = digits(text, 14, 16);
   if (!(month >= 1 && month <= 12 && day >= 1 && day <= daysIn(year, month))) return null;
-  if (!(hour <= 23 && minute <= 59)) return null;
+  // Years under 100 are not those of a four-digit form: `Date` would take 31 for 1931.
+  if (!(year >= 100 && hour <= 23 && minute <= 59)) return null;
   const local = Date.UTC(year, month - 1, day, hour, minute);
   return text.length === 16 ? { local, offset: null } : withRest(local, text.slice(16));
 }
