@@ -25,7 +25,7 @@ test('results.csv has the agreed columns, with the units of the job', () => {
       'shear_range_equivalent [kN],cycles_per_year,fastener_damage_per_year,' +
       'stress_range_max [MPa],stress_range_equivalent [MPa],member_damage_per_year,life [years],' +
       'slip_peak [mm],sliding_per_year [mm],buckling_utilisation,governing_check,utilisation,' +
-      'passes,verdict,remedy,damage_scaled_from [days]',
+      'passes,verdict,remedy,damage_scaled_from [days],fastener_damage_filled_share,member_damage_filled_share',
   );
   expect(headerOf(resultsCsv(us))).toBe(
     headerOf(resultsCsv(si))
