@@ -12,6 +12,11 @@ export class GrowingColumn {
     return this.count;
   }
 
+  /** The number pushed last. */
+  get last(): number {
+    return this.values[this.count - 1];
+  }
+
   push(value: number): void {
     if (this.count === this.values.length) {
       const longer = new Float64Array(2 * this.count);

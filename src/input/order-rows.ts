@@ -1,10 +1,5 @@
 import type { FindingList } from './finding-list.ts';
 
-/** What is done about rows of the same time. Rows that are out of order are put in order. */
-export interface OrderRules {
-  readonly repeats: 'refuse' | 'first' | 'last';
-}
-
 /** Times and channels, row by row. */
 export interface Columns {
   readonly times: Float64Array;
@@ -15,10 +10,15 @@ export interface Columns {
  * Puts rows in order of time and leaves out all but one of those of the same time.
  *
  * @param columns the rows in the order of the file
+ * @param repeats which row of the same time is kept, or `refuse`
  * @param list takes every row that was moved or left out
- * @returns the columns as they are where nothing has to be done
+ * @returns the columns as they are where nothing has to be done; a time that stands twice where that is refused
  */
-export function orderRows(columns: Columns, { repeats }: OrderRules, list: FindingList): Columns {
+export function orderRows(
+  columns: Columns,
+  repeats: 'refuse' | 'first' | 'last',
+  list: FindingList,
+): Columns | { readonly repeated: number } {
   const { times } = columns;
   if (rises(times)) return columns;
   const order = Uint32Array.from(times, (_, i) => i);
@@ -30,6 +30,8 @@ export function orderRows(columns: Columns, { repeats }: OrderRules, list: Findi
     } else latest = time;
   }
   order.sort((a, b) => times[a] - times[b] || a - b);
+  const twice = order.findIndex((row, i) => i > 0 && times[row] === times[order[i - 1]]);
+  if (twice > 0 && repeats === 'refuse') return { repeated: times[order[twice]] };
   const kept = order.filter((row, i) => {
     const other = repeats === 'last' ? order[i + 1] : order[i - 1];
     if (other === undefined || times[other] !== times[row]) return true;

@@ -120,7 +120,7 @@ function mappedColumns(
     const nearest = nearestName(header, headers);
     return report(findings, place, {
       found: header,
-      expected: `a column of the record: ${headers.join(', ')}`,
+      expected: `a column of the record: ${listed(headers)}`,
       ...(nearest === undefined ? {} : { nearest }),
     });
   });
@@ -155,6 +155,11 @@ function mappedColumn(
 /** A header or a mapping's word for the time; of a time in two columns, `date` is the day and `time` the clock. */
 function isTime(name: string): boolean {
   return name === 'time' || name === 'date';
+}
+
+/** The first headers, enough to see what the file is. */
+function listed(headers: readonly string[]): string {
+  return headers.length > 12 ? `${headers.slice(0, 12).join(', ')}, …` : headers.join(', ');
 }
 
 function reportNoTime(headers: readonly string[], place: Place, findings: Findings): void {

@@ -1,14 +1,16 @@
+import { readFileRows } from './file-rows.ts';
 import type { FindingList } from './finding-list.ts';
 import { type Findings, report } from './findings.ts';
 import type { JudgingRules } from './judging-rules.ts';
 import { orderRows } from './order-rows.ts';
+import { prepareFile } from './prepare-file.ts';
 import { RecordClock } from './record-clock.ts';
 import type { ChannelQuantity } from './record-columns.ts';
-import { prepareFile, type RecordFile, type RecordReading, readFileRows } from './record-file.ts';
+import type { PreparedFile, RecordFile, RecordReading } from './record-file.ts';
 import type { RecordForm } from './record-form.ts';
 import { RecordRows } from './record-rows.ts';
 import { repeatedFaults } from './repeated-faults.ts';
-import { valueBounds } from './value-bounds.ts';
+import { type LeftOut, valueBounds } from './value-bounds.ts';
 import { type ZoneClock, zoneClock } from './zone-clock.ts';
 
 /** The record as it stands in its files: times that rise, and channels with blanks. */
@@ -53,19 +55,13 @@ export async function readRecord(
   const faults = repeatedFaults(findings);
   const expected = files.reduce((sum, { bytes }) => sum + bytes.size / BYTES_A_ROW, 0);
   const rows = new RecordRows(expected);
-  const late: (() => void)[] = [];
-  const leaveOut = judging.band.leaveOut
-    ? ({ row, channel, value }: { row: number; channel: string; value: number }) =>
-        late.push(() => {
-          const time = rows.times.taken()[row];
-          const kind = 'out of band';
-          list.add({ kind, time, channel, value, hours: null, done: 'left out' });
-        })
-    : null;
+  const leaveOut = ({ time, channel, value }: LeftOut) =>
+    list.add({ kind: 'out of band', time, channel, value, hours: null, done: 'left out' });
+  const { band, repeats, disorder } = judging;
   const reading: RecordReading = {
     form,
-    bounds: valueBounds(judging.band.from, judging.band.to, leaveOut),
-    refuses: { repeats: judging.repeats === 'refuse', disorder: judging.disorder === 'refuse' },
+    bounds: valueBounds(band.from, band.to, band.leaveOut ? leaveOut : null),
+    refuses: { repeats: repeats === 'refuse', disorder: disorder === 'refuse' },
     findings,
     faults,
   };
@@ -88,8 +84,7 @@ export async function readRecord(
     report(findings, { file: files[0].name }, { found, expected: 'two rows or more' });
   }
   if (findings.issues.length > before || clock === null) return null;
-  for (const tell of late) tell();
-  return tableOf(rows, clock, zone, { judging, list });
+  return tableOf(rows, clock, zone, { judging, list, findings, file: files[0].name });
 }
 
 async function namedZone(
@@ -103,10 +98,12 @@ async function namedZone(
   return report(findings, place, { found: name, expected });
 }
 
-type Prepared = NonNullable<Awaited<ReturnType<typeof prepareFile>>>;
-
 /** Sees to it that all files hold the same channels. */
-function matchChannels({ name, layout, channels }: Prepared, rows: RecordRows, findings: Findings) {
+function matchChannels(
+  { name, layout, channels }: PreparedFile,
+  rows: RecordRows,
+  findings: Findings,
+) {
   if (rows.fileStarts.length === 0) {
     for (const column of channels) rows.addChannel(column.name, column.measure!.quantity);
     return true;
@@ -120,24 +117,32 @@ function matchChannels({ name, layout, channels }: Prepared, rows: RecordRows, f
   return false;
 }
 
+interface Ordering {
+  readonly judging: JudgingRules;
+  readonly list: FindingList;
+  readonly findings: Findings;
+  /** The first file, for the place of a fault. */
+  readonly file: string;
+}
+
 function tableOf(
   rows: RecordRows,
   clock: RecordClock,
   zone: ZoneClock | null,
-  { judging, list }: { judging: JudgingRules; list: FindingList },
-): RecordTable {
+  { judging, list, findings, file }: Ordering,
+): RecordTable | null {
   const columns = [...rows.channels].map(([name, values]) => [name, values.taken()] as const);
   const taken = { times: rows.times.taken(), channels: new Map(columns) };
   for (const time of clock.doubledOnce) {
     const [kind, done] = ['doubled hour once', 'taken as the first time, in summer time'] as const;
     list.add({ kind, time, channel: '', value: null, hours: null, done });
   }
+  const ordered = orderRows(taken, judging.repeats, list);
+  if ('repeated' in ordered) {
+    const found = `${new Date(ordered.repeated).toISOString().slice(0, 19)} twice, once sorted`;
+    const hint = 'Say record.repeats: first or last.';
+    return report(findings, { file }, { found, expected: 'each time once', hint });
+  }
   const fileStarts = rows.fileStarts.slice(1).map((row) => taken.times[row]);
-  return {
-    ...orderRows(taken, judging, list),
-    quantities: rows.quantities,
-    offset: clock.utcOffset,
-    zone,
-    fileStarts,
-  };
+  return { ...ordered, quantities: rows.quantities, offset: clock.utcOffset, zone, fileStarts };
 }

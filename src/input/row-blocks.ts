@@ -3,17 +3,20 @@ import { CsvError, parse } from 'csv-parse/sync';
 /** Takes a row's cells and its line, from 1; answers false where no more rows are wanted. */
 export type TakeRow = (cells: readonly string[], line: number) => boolean;
 
-/** A quote that is opened and never closed, by the line where the row with it begins. */
-export class OpenQuoteError extends Error {
+/** A text that cannot be cut: a quote is never closed, or a row is far too long. */
+export class RowError extends Error {
+  /** The line where the row begins. */
   readonly line: number;
+  readonly kind: 'quote' | 'length';
 
-  constructor(line: number) {
-    super(`a quote in line ${line} is never closed`);
+  constructor(kind: 'quote' | 'length', line: number) {
+    super(`row in line ${line}: ${kind}`);
+    this.kind = kind;
     this.line = line;
   }
 }
 
-/** No row is longer than this: a quote is open. */
+/** No row of a record is longer. */
 const LONGEST_ROW = 1 << 20;
 
 /**
@@ -21,7 +24,7 @@ const LONGEST_ROW = 1 << 20;
  *
  * @param texts the text, with LF line ends
  * @param separator what stands between cells
- * @throws OpenQuoteError
+ * @throws RowError
  */
 export async function cutRows(
   texts: AsyncIterable<string>,
@@ -35,7 +38,7 @@ export async function cutRows(
     const end = text.includes('"') ? lastEndOutsideQuotes(text) : text.lastIndexOf('\n') + 1;
     held = text.slice(end);
     if (end === 0 && held.length <= LONGEST_ROW) continue;
-    if (held.length > LONGEST_ROW) throw new OpenQuoteError(line + linesIn(text.slice(0, end)));
+    if (held.length > LONGEST_ROW) throw new RowError('length', line + linesIn(text.slice(0, end)));
     const next = takeAll(text.slice(0, end), separator, line, take);
     if (next === null) return;
     line = next;
@@ -98,7 +101,7 @@ function parseRows(text: string, separator: string, line: number): string[][] {
     if (!(error instanceof CsvError)) throw error;
     // The text begins with the row whose quote stays open.
     const within = error.code === 'CSV_QUOTE_NOT_CLOSED' ? 1 : Number(error.lines) || 1;
-    throw new OpenQuoteError(line - 1 + within);
+    throw new RowError('quote', line - 1 + within);
   }
 }
 

@@ -2,8 +2,8 @@ import type { ChannelQuantity } from './record-columns.ts';
 
 /** A value that was outside its bounds and is taken as missing. */
 export interface LeftOut {
-  /** From 0, over all files. */
-  readonly row: number;
+  /** [ms on the record's clock] */
+  readonly time: number;
   readonly channel: string;
   readonly value: number;
 }

@@ -10,7 +10,7 @@ const DATE =
   /^(\d{1,4}|[a-z]{3,9})[-/. ]+(\d{1,2}|[a-z]{3,9})\.?[-/., ]+(\d{1,4})(?=$|[t ,])[t ,]*/;
 const COMPACT = /^(\d{4})(\d\d)(\d\d)(?=$|[t ])[t ]*/;
 const CLOCK =
-  /^(\d{1,2})(?:[:.h](\d\d)(?:[:.](\d\d)(?:[.,](\d{1,9}))?)?)?\s*(?:([ap])\.?\s?m\.?)?\s*(z|utc|gmt|[+-]\d\d:?\d\d)?$/;
+  /^(\d{1,2})(?:[:.h](\d\d)(?:[:.](\d\d)(?:[.,](\d{1,9}))?)?)?\s*(?:([ap])\.?\s?m\.?)?\s*(z|utc|gmt|[+-](?:0\d|1[0-4]):?[0-5]\d)?$/;
 const MONTHS = ['jan', 'feb', 'mar', 'apr', 'may', 'jun', 'jul', 'aug', 'sep', 'oct', 'nov', 'dec'];
 const MONTH_NAMES =
   /^(?:jan(?:uary)?|feb(?:ruary)?|mar(?:ch)?|apr(?:il)?|may|june?|july?|aug(?:ust)?|sept?(?:ember)?|oct(?:ober)?|nov(?:ember)?|dec(?:ember)?)$/;
