@@ -155,6 +155,9 @@ describe('warmer zones', () => {
   it('stand beside the record as it is, in summary and table', async () => {
     const result = await warmedBy('{ add: 2 K, daily_swing: 1.1 }');
     expect(summary(result)).toContain('What if: 2 K added, daily swing times 1.1');
+    expect(summary(result)).toContain(
+      'A check fails in 0 of 1 runs in warmer zones, in 0 as the record is.',
+    );
     const [header, first] = warmingCsv(result)!
       .split('\n')
       .map((row) => row.split(','));

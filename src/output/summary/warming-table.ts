@@ -1,7 +1,8 @@
-import type { Job, Result, WarmedRun } from '../../model.ts';
+import type { Job, Result, RunResult, WarmedRun } from '../../model.ts';
 import { shortestLife } from '../life-text.ts';
 import { amount, connectionName } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
+import { runFails } from '../run-fails.ts';
 import { bullet, table } from './text-layout.ts';
 
 /** What the zones were warmed by, as a heading; blank where the job asks for none. */
@@ -43,7 +44,9 @@ export function warmingTable({ job, runs, warmed }: Result): string[] {
     job.extremes.length === 0
       ? 'Lock-in temperatures and constant zones stay as they are.'
       : 'Lock-in temperatures, constant zones and extremes stay as they are.';
-  return [table([header, ...rows], [1, 2, 5, 6]), bullet(kept)];
+  const failing = (some: readonly Pick<RunResult, 'connections'>[]) => some.filter(runFails).length;
+  const count = `A check fails in ${failing(warmed)} of ${runs.length} runs in warmer zones, in ${failing(runs)} as the record is.`;
+  return [table([header, ...rows], [1, 2, 5, 6]), bullet(count), bullet(kept)];
 }
 
 function useOf({ connections, governing }: Pick<WarmedRun, 'connections' | 'governing'>): string {
