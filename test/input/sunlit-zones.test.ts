@@ -83,6 +83,21 @@ describe('a zone in the sun', () => {
     expect(horizon.temperature[12]).toBeLessThan(sunny.temperature[12] - 5);
   });
 
+  it('stays dark at night where a gap in the light spans it, and is not counted as covered there', async () => {
+    const record = csvRecord(START, 72, {
+      'air [degC]': () => 20,
+      'global [W/m^2]': (h) => (h > 15 && h < 34 ? '' : Math.max(0, sunlight(h))),
+    });
+    const zone =
+      '{ air: air, sun: { global: global }, tilt: 0 deg, sky: isotropic, absorptance: 1 }';
+    const [bar] = (await jobOf(files(zone, SITE, record))).zones;
+    const { irradiance } = bar.sunlit!;
+    // at 45° N in June the sun is down from 21:00 to 03:00 at the least
+    for (let hour = 22; hour <= 27; hour++) expect(irradiance[hour]).toBe(0);
+    expect(irradiance[33]).toBeGreaterThan(100);
+    expect(Array.from(bar.standing.slice(15, 35))).toEqual([0, ...new Array(18).fill(2), 0]);
+  });
+
   it('says in the summary what it was reckoned from', async () => {
     const job = await jobOf(
       files(
