@@ -103,7 +103,7 @@ function toMap(
       continue;
     }
     const header = {
-      place: column.header.place,
+      place: column.unitPlace ?? column.header.place,
       ...(column.unit === undefined ? {} : { unit: column.unit }),
     };
     const value = {

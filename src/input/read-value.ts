@@ -133,7 +133,10 @@ function readId({ text: typed }: SourceText): Outcome<string> {
   const safe = /^[^/\\:*?"<>|\p{Cc}]{1,100}$/u.test(typed) && !/^[. ]|[. ]$/.test(typed);
   const reserved = /^(?:con|prn|aux|nul|com\d|lpt\d)(?:\.|$)/i.test(typed);
   if (safe && !reserved) return { value: typed };
-  return fault(typed, 'a name that may stand in the name of a file, without / \\ : * ? " < > |');
+  const hint = reserved
+    ? 'Some systems keep this name for a device.'
+    : 'No full stop or space at an end, at most 100 characters, none of / \\ : * ? " < > |.';
+  return fault(typed, 'a name that may stand in the name of a file', hint);
 }
 
 function readYesOrNo({ text: typed }: SourceText, key: Key): Outcome<boolean> {

@@ -15,6 +15,8 @@ export interface Column {
   readonly name: string;
   readonly unit?: string;
   readonly header: Cell;
+  /** Where its unit stands, if not in the header. */
+  readonly unitPlace?: Place;
 }
 
 /** The columns that a header row names, `null` where it names none; one that stands twice is reported. */
@@ -48,7 +50,9 @@ export function withUnitsRow(
   }
   const withUnits = columns.map((column, i) => {
     const unit = first[i]?.text.replace(/^[[(](.*)[\])]$/, '$1') ?? '';
-    return column === null || isNone(unit) ? column : { ...column, unit };
+    return column === null || isNone(unit)
+      ? column
+      : { ...column, unit, unitPlace: first[i].place };
   });
   return { columns: withUnits, rows: rest };
 }

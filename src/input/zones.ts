@@ -27,7 +27,9 @@ export function readZones(
       report(findings, place, { found: name, expected: 'another name: extremes use this one' });
     }
     if (value.type !== 'map') {
+      const found = value.type === 'text' && value.text !== '' ? { found: value.text } : {};
       report(findings, value.place, {
+        ...found,
         expected: 'a column, a constant or air, such as { column: deck } or { constant: 21 degC }',
       });
       continue;

@@ -53,7 +53,7 @@ async function run(number: number): Promise<void> {
   const took = performance.now() - started;
   ends[end]++;
   if (values.only !== undefined) console.log(said);
-  if (took > SLOW) console.log(`Mutant ${number} took ${Math.round(took)} ms: ${how} in ${file}`);
+  if (took > SLOW) console.error(`Mutant ${number} took ${Math.round(took)} ms: ${how} in ${file}`);
   if (end === 'fault') console.log(`Mutant ${number}, ${how} in ${file} of job ${job}: ${why}`);
 }
 
