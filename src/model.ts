@@ -409,6 +409,8 @@ export interface Job {
   readonly zones: readonly Zone[];
   /** What judging the record found, in order of time. */
   readonly recordFindings: readonly RecordFinding[];
+  /** How files of the record were read that are not in the plain form, a sentence a file. */
+  readonly recordReadAs: readonly string[];
   /** Years that the record stands for, where the job says so. */
   readonly represents: number | null;
   /** The weather file that the record was read from; `null` for a CSV. */
@@ -436,6 +438,7 @@ export type ZonesJob = Pick<
   | 'axis'
   | 'zones'
   | 'recordFindings'
+  | 'recordReadAs'
   | 'represents'
   | 'weather'
   | 'inputs'

@@ -91,6 +91,7 @@ async function readWhole(map: SourceMap, files: Files, findings: Findings): Prom
     axis: basis.axis,
     zones: [...zones.items.values()],
     recordFindings: basis.found,
+    recordReadAs: basis.record.readAs,
     represents: basis.represents,
     weather: basis.weather,
     warming,

@@ -1,6 +1,6 @@
 import { dateOrder } from './date-order.ts';
 import { type Findings, report } from './findings.ts';
-import { numberForm, numberReader } from './number-form.ts';
+import { type NumberForm, numberForm, numberReader } from './number-form.ts';
 import { type RecordColumn, recordColumns } from './record-columns.ts';
 import {
   type LaidOutFile,
@@ -45,9 +45,10 @@ export async function prepareFile(
   const rows = written
     .filter(({ text, line }) => line >= layout.dataLine && text !== '')
     .map(({ text }) => cutLine(text, layout.separator));
-  const toNumber = numbersOf(rows, channels, { file, layout, form, findings });
-  if (toNumber === null) return null;
-  const found: LaidOutFile = { ...file, encoding, layout, time, channels, toNumber };
+  const numbers = numbersOf(rows, channels, { file, layout, form, findings });
+  if (numbers === null) return null;
+  const toNumber = numberReader(numbers);
+  const found: LaidOutFile = { ...file, encoding, layout, time, channels, numbers, toNumber };
   const order = form.order ?? (await dateOrder(found, findings));
   if (order === undefined) return null;
   const read = timeReader({ order, toNumber }, form);
@@ -87,10 +88,10 @@ function numbersOf(
   rows: readonly (readonly string[])[],
   channels: readonly RecordColumn[],
   { file, layout, form, findings }: Numbers,
-): ((text: string) => number) | null {
+): NumberForm | null {
   const samples = rows.flatMap((cells) => channels.map(({ index }) => cells[index] ?? ''));
   const numbers = numberForm(samples, form.numbers);
-  if (!('unclear' in numbers)) return numberReader(numbers);
+  if (!('unclear' in numbers)) return numbers;
   const place = { file: file.name, line: layout.dataLine };
   return report(findings, place, {
     found: numbers.unclear,

@@ -3,6 +3,7 @@ import { cellName } from './cell-name.ts';
 import type { FileBytes } from './files.ts';
 import { type Findings, report } from './findings.ts';
 import type { WrittenTime } from './iso-time.ts';
+import type { NumberForm } from './number-form.ts';
 import type { RecordColumn } from './record-columns.ts';
 import type { RecordForm } from './record-form.ts';
 import type { RecordLayout } from './record-layout.ts';
@@ -35,6 +36,7 @@ export interface PreparedFile extends RecordFile {
   /** Date and time of a row, or one of them. */
   readonly time: readonly RecordColumn[];
   readonly channels: readonly RecordColumn[];
+  readonly numbers: NumberForm;
   readonly toNumber: (text: string) => number;
   readonly order: DateOrder | null;
   /** The first time in the file that can be read. */

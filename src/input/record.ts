@@ -1,6 +1,7 @@
 import { readFileRows } from './file-rows.ts';
 import type { FindingList } from './finding-list.ts';
 import { type Findings, report } from './findings.ts';
+import { formWords } from './form-words.ts';
 import type { JudgingRules } from './judging-rules.ts';
 import { orderRows } from './order-rows.ts';
 import { prepareFile } from './prepare-file.ts';
@@ -27,6 +28,8 @@ export interface RecordTable {
   readonly zone: ZoneClock | null;
   /** Time of the first row of each file but the first [ms]. */
   readonly fileStarts: readonly number[];
+  /** How each file was read that is not in the plain form, a sentence each. */
+  readonly readAs: readonly string[];
 }
 
 /** How a record is written and what is done about doubtful rows. */
@@ -67,6 +70,7 @@ export async function readRecord(
   };
   let clock: RecordClock | null = null;
   let zone: ZoneClock | null = null;
+  const readAs: string[] = [];
   for (const file of files) {
     const prepared = await prepareFile(file, reading);
     if (prepared === null) continue;
@@ -77,6 +81,7 @@ export async function readRecord(
     }
     if (!matchChannels(prepared, rows, findings)) continue;
     await readFileRows(prepared, rows, clock, reading);
+    readAs.push(formWords(prepared));
   }
   faults.finish();
   if (findings.issues.length === before && rows.times.length < 2) {
@@ -84,7 +89,8 @@ export async function readRecord(
     report(findings, { file: files[0].name }, { found, expected: 'two rows or more' });
   }
   if (findings.issues.length > before || clock === null) return null;
-  return tableOf(rows, clock, zone, { judging, list, findings, file: files[0].name });
+  const table = tableOf(rows, clock, zone, { judging, list, findings, file: files[0].name });
+  return table && { ...table, readAs: readAs.filter((text) => text !== '') };
 }
 
 async function namedZone(
@@ -130,7 +136,7 @@ function tableOf(
   clock: RecordClock,
   zone: ZoneClock | null,
   { judging, list, findings, file }: Ordering,
-): RecordTable | null {
+): Omit<RecordTable, 'readAs'> | null {
   const columns = [...rows.channels].map(([name, values]) => [name, values.taken()] as const);
   const taken = { times: rows.times.taken(), channels: new Map(columns) };
   for (const time of clock.doubledOnce) {

@@ -40,6 +40,7 @@ export function readWeatherRecord(
     offset: site.utcOffset * HOUR,
     zone: null,
     fileStarts: [],
+    readAs: [],
     site,
     weather: { place: name, years, setOn },
   };

@@ -24,6 +24,7 @@ export function readZonesJob(path: string): Promise<ZonesJob> {
       axis: basis.axis,
       zones: [...zones.items.values()],
       recordFindings: basis.found,
+      recordReadAs: basis.record.readAs,
       represents: basis.represents,
       weather: basis.weather,
       inputs: files.inputs,

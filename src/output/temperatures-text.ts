@@ -6,7 +6,7 @@ import { grouped, shortNumber } from './number-text.ts';
 import { inUnits } from './quantity.ts';
 import { defaultLines } from './summary/default-lines.ts';
 import { findingCounts, ONE_BY_ONE } from './summary/found-lines.ts';
-import { spanText, weatherLine } from './summary/record-lines.ts';
+import { sourceLines, spanText } from './summary/record-lines.ts';
 import { sunLines } from './summary/sun-lines.ts';
 import { bullet, table, wrap } from './summary/text-layout.ts';
 import { swingTable } from './swing-table.ts';
@@ -21,7 +21,7 @@ import { swingTable } from './swing-table.ts';
 export function temperaturesText(job: ZonesJob, facts: readonly ZoneFacts[]): string {
   const zoneDefaults = job.defaults.filter(({ key }) => /^(?:zones |record)/.test(key));
   const sections = [
-    [`${job.title}: temperatures`, '', ...weatherLine(job), wrap(spanText(job))].join('\n'),
+    [`${job.title}: temperatures`, '', ...sourceLines(job), wrap(spanText(job))].join('\n'),
     section('Each zone', [extremesTable(facts, job)]),
     section('Daily swing, whole days', [dailyTable(facts, job)]),
     section('Swings by size, a year', swingTable(facts, job.units)),

@@ -5,7 +5,8 @@ import { shortNumber } from './number-text.ts';
 import { DRAWING_LEGEND, runDrawing } from './run-drawing.ts';
 import { defaultLines } from './summary/default-lines.ts';
 import { derivedLines } from './summary/derived-lines.ts';
-import { spanText, weatherLine } from './summary/record-lines.ts';
+import { findingCounts } from './summary/found-lines.ts';
+import { sourceLines, spanText } from './summary/record-lines.ts';
 import { sunLines } from './summary/sun-lines.ts';
 import { bullet, table, wrap } from './summary/text-layout.ts';
 import { warmingTitle } from './summary/warming-table.ts';
@@ -20,7 +21,8 @@ export function understood(job: Job): string {
   const members = distinct(job.runs.map((run) => run.member));
   const fasteners = distinct(job.runs.flatMap((run) => run.fasteners));
   const sections = [
-    [job.title, '', ...weatherLine(job), wrap(spanText(job))].join('\n'),
+    [job.title, '', ...sourceLines(job), wrap(spanText(job))].join('\n'),
+    section('Found in the record', findingCounts(job.recordFindings)),
     section('Zones', [zoneTable(job)]),
     section('Zones reckoned from sun and air', sunLines(job)),
     section(`Runs (${DRAWING_LEGEND})`, [runTable(job)]),

@@ -141,3 +141,16 @@ describe('the findings of a job', () => {
     expect(job.warnings.filter((text) => text.startsWith('record:'))).toHaveLength(1);
   });
 });
+
+describe('how a record was read', () => {
+  it('is said where it is not the plain form', async () => {
+    const text = 'Logger 7\n\ntime;rail [°C]\n13/01/2031 10:00;12,25\n13/01/2031 11:00;12,5\n';
+    const bytes = Buffer.from(text, 'latin1');
+    const { record } = await readText({ 'r.csv': bytes });
+    expect(record?.readAs).toEqual([
+      'r.csv is read with Windows-1252 characters, semicolons between cells, header in line 3, decimal commas, dates day-first.',
+    ]);
+    const plain = await readText({ 'r.csv': csvRecord(START, 3, { 'rail [degC]': day }) });
+    expect(plain.record?.readAs).toEqual([]);
+  });
+});

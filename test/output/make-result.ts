@@ -56,6 +56,7 @@ export function makeResult(recipe: ResultRecipe = {}): Result {
     axis,
     zones,
     recordFindings: [],
+    recordReadAs: [],
     represents: null,
     weather: null,
     warming: null,

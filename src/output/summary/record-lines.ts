@@ -11,7 +11,7 @@ export function recordLines({ job, runs }: Result): string[] {
   const years = groupedRuns(runs.map((run) => [run.run.id, yearsText(run.years)]));
   const passes = groupedRuns(runs.map((run) => [run.run.id, String(run.passes)]));
   return [
-    ...weatherLine(job),
+    ...sourceLines(job),
     wrap(`${spanText(job)} It covers ${covered} and stands for ${years}.`),
     wrap(`Passes through it until no slip changed: ${passes}.`),
   ];
@@ -24,9 +24,9 @@ export function spanText({ axis: { times, stepHours } }: ZonesJob): string {
   return `Record: ${grouped(times.length)} samples, ${first} to ${last}, every ${shortNumber(stepHours)} h.`;
 }
 
-/** The weather file that the record was read from; nothing for a CSV. */
-export function weatherLine({ weather }: ZonesJob): string[] {
-  if (weather === null) return [];
+/** The weather file that the record was read from, or how a CSV was read that is not in the plain form. */
+export function sourceLines({ weather, recordReadAs }: ZonesJob): string[] {
+  if (weather === null) return recordReadAs.map((text) => wrap(text));
   const { place, years, setOn } = weather;
   const [first, last] = years;
   const from = first === last ? `${first}` : `${first} to ${last}`;
