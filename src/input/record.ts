@@ -90,6 +90,7 @@ export async function readRecord(
   }
   if (findings.issues.length > before || clock === null) return null;
   const table = tableOf(rows, clock, zone, { judging, list, findings, file: files[0].name });
+  if (zone !== null) readAs.push(`Times are on the standard time of ${zone.zone} all year.`);
   return table && { ...table, readAs: readAs.filter((text) => text !== '') };
 }
 

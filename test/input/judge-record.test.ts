@@ -150,6 +150,10 @@ describe('how a record was read', () => {
     expect(record?.readAs).toEqual([
       'r.csv is read with Windows-1252 characters, semicolons between cells, header in line 3, decimal commas, dates day-first.',
     ]);
+    const zoned = await readText({ 'r.csv': bytes }, 'time: { zone: Europe/London }');
+    expect(zoned.record?.readAs[1]).toBe(
+      'Times are on the standard time of Europe/London all year.',
+    );
     const plain = await readText({ 'r.csv': csvRecord(START, 3, { 'rail [degC]': day }) });
     expect(plain.record?.readAs).toEqual([]);
   });
