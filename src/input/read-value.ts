@@ -132,10 +132,13 @@ function readRange(source: SourceText, key: Key): Outcome<RangeValue> {
 function readId({ text: typed }: SourceText): Outcome<string> {
   const safe = /^[^/\\:*?"<>|\p{Cc}]{1,100}$/u.test(typed) && !/^[. ]|[. ]$/.test(typed);
   const reserved = /^(?:con|prn|aux|nul|com\d|lpt\d)(?:\.|$)/i.test(typed);
-  if (safe && !reserved) return { value: typed };
+  const formula = /^[=+@-]/.test(typed);
+  if (safe && !reserved && !formula) return { value: typed };
   const hint = reserved
     ? 'Some systems keep this name for a device.'
-    : 'No full stop or space at an end, at most 100 characters, none of / \\ : * ? " < > |.';
+    : formula
+      ? 'A spreadsheet that opens the results would take it for a formula.'
+      : 'No full stop or space at an end, at most 100 characters, none of / \\ : * ? " < > |.';
   return fault(typed, 'a name that may stand in the name of a file', hint);
 }
 

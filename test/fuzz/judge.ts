@@ -33,7 +33,8 @@ export async function judge(folder: string, out: string): Promise<Judgement> {
     const tables = ['results.csv', 'checks.csv', 'cycles.csv', 'record.csv'];
     const written = tables.map((name) => readFileSync(join(out, name), 'utf8'));
     const text = [lines[0], ...written].join('\n');
-    const why = brokenFolder(out) ?? nonsense(text) ?? nonsense(understood(job));
+    const typed = contents(folder);
+    const why = brokenFolder(out) ?? nonsense(`${text}\n${understood(job)}`, typed);
     return { end: why === null ? 'screened' : 'fault', why: why ?? '', text, read: allOf(job) };
   } catch (error) {
     if (!(error instanceof InputError)) {
@@ -71,9 +72,9 @@ function badIssue(issue: Issue): string | null {
 }
 
 /** Words that no result holds, unless the user called something so. */
-function nonsense(text: string): string | null {
+function nonsense(text: string, typed: string): string | null {
   const found = /undefined|\[object|(?<![\w-])NaN(?![\w-])/.exec(text);
-  if (found === null) return null;
+  if (found === null || typed.includes(found[0])) return null;
   return `results hold ${text.slice(Math.max(0, found.index - 80), found.index + 40)}`;
 }
 

@@ -114,6 +114,23 @@ describe('doubts', () => {
     expect(job.warnings.join('\n')).toMatch(words);
   });
 
+  it('of a record in °F under °C', async () => {
+    const folder = mkdtempSync(join(tmpdir(), 'job-'));
+    const record = readFileSync(join(SI, 'record.csv'), 'utf8');
+    const fahrenheit = record.replace(
+      /,(-?\d+),/g,
+      (_, celsius) => `,${Number(celsius) * 1.8 + 32},`,
+    );
+    writeFileSync(join(folder, 'record.csv'), fahrenheit);
+    const job = readFileSync(join(SI, 'job.yaml'), 'utf8');
+    writeFileSync(join(folder, 'job.yaml'), job.replace('77 degC', '170 degC'));
+    for (const name of ['members.csv', 'fasteners.csv', 'curves.csv', 'runs.csv']) {
+      writeFileSync(join(folder, name), readFileSync(join(SI, name)));
+    }
+    // 15 °C, the median, is 59 °F.
+    expect((await readJob(folder)).warnings.join()).toMatch(/zone south: .* 59 °C; check whether/);
+  });
+
   it.each([
     ['modulus: 70 GPa', 'modulus: 70000 GPa', 'Metals have 15 to 400 GPa'],
     ['modulus: 70 GPa', 'modulus: 70 MPa', 'Metals have 15 to 400 GPa'],
