@@ -84,7 +84,13 @@ function joinedRun(
   if (failing !== undefined) {
     const check = failing.checks.find((one) => one.check === 'joint gap')!;
     const at = `${failing.run}/${failing.number}`;
-    return { ...run, remedy: { kind: 'rework', check, at, changes: [] } };
+    // it may pass as the job stands, and not beside its changed neighbour
+    const last = { ...run.connections.at(-1)!, verdict: 'fails' as const };
+    return {
+      ...run,
+      connections: run.connections.with(-1, last),
+      remedy: { kind: 'rework', check, at, changes: [] },
+    };
   }
   const found = isFound(run.remedy) ? run.remedy : unchanged(run);
   return {
