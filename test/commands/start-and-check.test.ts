@@ -59,7 +59,7 @@ describe('check', () => {
     expect(text).toContain('grip 0.208 kN, an estimate');
     expect(text).toContain('net_area 394 mm^2');
     expect(text).toMatch(/R1 +[─]*■.*■[─]* +12 +6,600 mm +rail +rail on deck +15 °C/);
-    expect(text).toMatch(/R2 +─○──○───○──○───○──■───○──○───○──○───○──○─ /);
+    expect(text).toMatch(/R2 +─○──○──○──○──○──■──○──○──○──○──○──○─ /);
     expect(text).toContain('α 23e-6 / K');
     expect(text).toContain('The job can be screened: 2 runs with 24 connections.');
     for (const line of text.split('\n')) expect(line.length).toBeLessThanOrEqual(120);
