@@ -115,12 +115,16 @@ function matchChannels(
     for (const column of channels) rows.addChannel(column.name, column.measure!.quantity);
     return true;
   }
-  const names = channels.map((column) => column.name);
   const first = [...rows.channels.keys()];
-  if (names.length === first.length && names.every((one) => first.includes(one))) return true;
+  const isAlike = channels.every((column) => {
+    return rows.quantities.get(column.name) === column.measure!.quantity;
+  });
+  if (isAlike && channels.length === first.length) return true;
   const place = { file: name, line: Math.max(1, layout.headerLine) };
-  const expected = `the channels of the first file: ${first.join(', ')}`;
-  report(findings, place, { found: names.join(', '), expected });
+  const words = first.map((one) => `${one} (${rows.quantities.get(one)})`);
+  const expected = `the channels of the first file: ${words.join(', ')}`;
+  const found = channels.map((column) => `${column.name} (${column.measure!.quantity})`).join(', ');
+  report(findings, place, { found, expected });
   return false;
 }
 
