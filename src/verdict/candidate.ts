@@ -1,5 +1,5 @@
 import type { DamageTables } from '../damage/damage-table.ts';
-import type { Connection, Job, Run } from '../model.ts';
+import type { Job, Run } from '../model.ts';
 import { assessConnections, type RunAssessment } from './assess.ts';
 import { type RunRecord, runRecord, sketchOf } from './run-record.ts';
 
@@ -32,15 +32,26 @@ export interface Candidate {
  * How far over a limit the rough look must find a candidate for it to be dropped unscreened. The look may be off by
  * what the small cycles between the record's hottest and coldest hour do to the slips.
  */
-const CLEARLY_OVER = 1.1;
+export const CLEARLY_OVER = 1.1;
 
 /** Screens a changed run in full; `null` where a check fails. */
 export function tryRun(run: Run, search: Search): RunAssessment | null {
-  const { job, tables, record, sketch } = search;
+  return lookAt(run, search) && screenInFull(run, search);
+}
+
+/** A rough look at a changed run; `null` where it fails a check clearly. */
+export function lookAt(run: Run, { job, tables, sketch }: Search): RunAssessment | null {
   const rough = assessConnections(run, job, tables, sketch);
-  if (rough.connections.some((connection) => fails(connection, CLEARLY_OVER))) return null;
+  const over = rough.connections.some(({ checks }) =>
+    checks.some(({ status, utilisation }) => status === 'fail' && utilisation! > CLEARLY_OVER),
+  );
+  return over ? null : rough;
+}
+
+/** The whole assessment of a changed run; `null` where a check fails. */
+export function screenInFull(run: Run, { job, tables, record }: Search): RunAssessment | null {
   const assessment = assessConnections(run, job, tables, record);
-  return assessment.connections.some((connection) => fails(connection)) ? null : assessment;
+  return assessment.connections.every(({ verdict }) => verdict === 'ok') ? assessment : null;
 }
 
 /** The candidate that an assessment makes. */
@@ -55,8 +66,4 @@ export function utilisationOf({
   governing,
 }: Pick<RunAssessment, 'connections' | 'governing'>): number {
   return connections[governing].governing?.utilisation ?? 0;
-}
-
-function fails({ checks }: Connection, over = 1): boolean {
-  return checks.some(({ status, utilisation }) => status === 'fail' && (utilisation ?? 0) > over);
 }

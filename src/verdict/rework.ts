@@ -40,6 +40,8 @@ const QUANTITIES: readonly Quantity[] = [
 const FURTHEST = 20;
 /** Halvings of the factor: to within a thousandth. */
 const HALVINGS = 12;
+/** Longer runs are told what fails only: each try would cost more than its answer is worth. */
+const MOST_FASTENERS = 100;
 
 /**
  * Where no remedy passes: the check that stays furthest above its limit, and for each single quantity of the run as it
@@ -54,7 +56,9 @@ export function reworkOf(
     kind: 'rework',
     check: worst.governing!,
     at: `${worst.run}/${worst.number}`,
-    changes: QUANTITIES.flatMap((quantity) => singleChange(run, quantity, search) ?? []),
+    changes: (run.roles.length > MOST_FASTENERS ? [] : QUANTITIES).flatMap(
+      (quantity) => singleChange(run, quantity, search) ?? [],
+    ),
   };
 }
 
