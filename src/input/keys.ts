@@ -913,6 +913,14 @@ export const RUN_KEYS = {
     meaning:
       'Free member beyond the end fasteners; where positions start after 0, they give the left one.',
   },
+  length: {
+    ...LENGTH,
+    over: 0,
+    usual: [100, 2e5],
+    example: '7 m',
+    meaning:
+      'Length of the member. Nothing is reckoned from it: fasteners that do not fit on it are refused.',
+  },
   left_overhang: {
     ...LENGTH,
     from: 0,

@@ -7,6 +7,7 @@ import { lookUp, uniqueIds } from './library.ts';
 import { lockInOf, lockInTime, noteLockIn, structureOf } from './lock-in.ts';
 import { readKeys } from './read-keys.ts';
 import { rolesOf } from './run-fasteners.ts';
+import { checkLength } from './run-length.ts';
 import type { Clock, RunParts, RunValues } from './run-parts.ts';
 import { givenText, givenValue, placeOf, type SourceMap } from './source.ts';
 import { WARNINGS } from './warnings.ts';
@@ -28,6 +29,7 @@ function readRun(row: SourceMap, parts: RunParts, findings: Findings): Run | nul
   const slotted = lookUp(parts.fasteners, row, 'slotted', findings);
   const positions = positionsOf(values, row, findings);
   checkFixed(values, positions, row, findings);
+  checkLength(values, positions, row, findings);
   const time = lockInTime(values, row, parts.clock, findings);
   const lockIn = lockInOf(values, zone, time, parts.clock);
   const structure = structureOf(row, values, { ...parts, time, prefix }, findings);
