@@ -1,5 +1,6 @@
 import { createHash } from 'node:crypto';
-import { open, readFile } from 'node:fs/promises';
+import type { Stats } from 'node:fs';
+import { open, readFile, stat } from 'node:fs/promises';
 import { resolve } from 'node:path';
 import type { Place } from '../issue.ts';
 import type { InputFile } from '../model.ts';
@@ -57,38 +58,43 @@ export function filesOf(folder: string): Files {
       if (size === null) return null;
       const input = { name, sha256: '' };
       if (!inputs.some((input) => input.name === name)) inputs.push(input);
-      return { size, blocks: () => readBlocks(path, (sha256) => Object.assign(input, { sha256 })) };
+      const tellHash = (sha256: string) => Object.assign(input, { sha256 });
+      return { size, blocks: () => readBlocks(path, input.sha256 === '' ? tellHash : null) };
     },
   };
 }
 
 async function sizeOf(path: string): Promise<number> {
-  const file = await open(path);
-  try {
-    // Opening a folder succeeds; reading from it does not.
-    await file.read(new Uint8Array(1), 0, 1, 0);
-    return (await file.stat()).size;
-  } finally {
-    await file.close();
-  }
+  const found = await stat(path);
+  // Reading from a pipe or a device may never end.
+  if (!found.isFile()) throw Object.assign(new Error(path), { code: codeOf(found) });
+  await (await open(path)).close();
+  return found.size;
 }
 
-/** Reads a file to its end, and then tells its hash. */
+function codeOf(found: Stats): string {
+  return found.isDirectory() ? 'EISDIR' : 'no regular file';
+}
+
+/**
+ * Reads a file to its end, and then tells its hash.
+ * @param tellHash `null` where it is known
+ */
 async function* readBlocks(
   path: string,
-  tellHash: (sha256: string) => void,
+  tellHash: ((sha256: string) => void) | null,
 ): AsyncGenerator<Uint8Array> {
-  const hash = createHash('sha256');
+  const hash = tellHash === null ? null : createHash('sha256');
   const file = await open(path);
   try {
     for (;;) {
       const { buffer, bytesRead } = await file.read(new Uint8Array(BLOCK), 0, BLOCK);
       if (bytesRead === 0) break;
       const bytes = buffer.subarray(0, bytesRead);
-      hash.update(bytes);
+      hash?.update(bytes);
       yield bytes;
     }
-    tellHash(hash.digest('hex'));
+    if (hash !== null) tellHash?.(hash.digest('hex'));
   } finally {
     await file.close();
   }

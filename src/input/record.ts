@@ -38,7 +38,7 @@ export interface RecordRules {
   readonly judging: JudgingRules;
 }
 
-/** A row of hourly values takes some 30 bytes: where to begin with the length of the columns. */
+/** Hardly a row takes fewer bytes: how long the columns are made to begin with. */
 const BYTES_A_ROW = 20;
 
 /**

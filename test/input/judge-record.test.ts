@@ -1,7 +1,8 @@
+import { createHash } from 'node:crypto';
 import { describe, expect, it } from 'vitest';
 import { judgeChannels } from '../../src/input/judge-record.ts';
 import { readText } from '../support/read-text.ts';
-import { csvRecord, jobOf, PAIR } from '../support/temporary-job.ts';
+import { csvRecord, jobOf, messagesOf, PAIR } from '../support/temporary-job.ts';
 
 const START = Date.UTC(2031, 4, 1);
 const HOUR = 3_600_000;
@@ -156,5 +157,26 @@ describe('how a record was read', () => {
     );
     const plain = await readText({ 'r.csv': csvRecord(START, 3, { 'rail [degC]': day }) });
     expect(plain.record?.readAs).toEqual([]);
+  });
+});
+
+describe('the file of a record', () => {
+  const job = (file: string) => ({
+    'job.yaml': `record: { file: ${file} }\nzones: { bar: { column: bar } }\n${PAIR}`,
+  });
+
+  it.each([
+    ['.', 'This is a folder.'],
+    ['nothing.csv', 'There is no file of this name.'],
+    ['/dev/zero', 'It could not be read (no regular file).'],
+  ])('is one that can be read to its end: %s', async (file, why) => {
+    expect((await messagesOf(job(file))).join(' ')).toContain(why);
+  });
+
+  it('is named with its hash', async () => {
+    const text = csvRecord(START, 30, { 'bar [degC]': day });
+    const { inputs } = await jobOf({ ...job('record.csv'), 'record.csv': text });
+    const sha256 = createHash('sha256').update(text).digest('hex');
+    expect(inputs[1]).toEqual({ name: 'record.csv', sha256 });
   });
 });
