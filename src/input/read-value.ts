@@ -60,8 +60,8 @@ const READERS: { readonly [K in Kind]: Reader<KindValues[K]> } = {
   'force or stress': text(readRange),
   number: text(readPlainNumber),
   'whole number': text(readWholeNumber),
-  text: text(({ text }) => ({ value: text })),
-  name: text(({ text }) => ({ value: text })),
+  text: text(readOneLine),
+  name: text(readOneLine),
   unit: text(({ text }) => ({ value: text })),
   id: text(readId),
   'yes or no': text(readYesOrNo),
@@ -140,6 +140,12 @@ function readId({ text: typed }: SourceText): Outcome<string> {
       ? 'A spreadsheet that opens the results would take it for a formula.'
       : 'No full stop or space at an end, at most 100 characters, none of / \\ : * ? " < > |.';
   return fault(typed, 'a name that may stand in the name of a file', hint);
+}
+
+/** Texts stand in tables and on terminals, which line ends and other control characters would upset. */
+function readOneLine({ text: typed }: SourceText): Outcome<string> {
+  if (!/\p{Cc}/u.test(typed)) return { value: typed };
+  return fault(typed, 'a text on one line, without control characters');
 }
 
 function readYesOrNo({ text: typed }: SourceText, key: Key): Outcome<boolean> {

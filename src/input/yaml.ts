@@ -86,6 +86,9 @@ function entriesOf(
       continue;
     }
     const name = soundText(typedText(key), keyPlace, findings);
+    if (/\p{Cc}/u.test(name)) {
+      report(findings, keyPlace, { found: name, expected: 'a key without control characters' });
+    }
     const path = pathOf(place, name);
     const blank: Source = { type: 'text', text: '', place: { ...keyPlace, key: path } };
     entries.set(name, {
