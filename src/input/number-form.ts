@@ -17,7 +17,7 @@ const APOSTROPHES = /[\u2019\u02bc]/g;
 
 /**
  * Finds how numbers are written from some of them. `12,5` has a decimal comma and `1,234.5` groups by commas;
- * `1,250` alone may be either.
+ * `1,250` alone may be either, and so may `1.250` beside `980`.
  *
  * @param samples texts of cells, numbers or not
  * @param given what the job says
@@ -27,38 +27,47 @@ export function numberForm(
   samples: Iterable<string>,
   given: NumberFormGiven,
 ): NumberForm | { readonly unclear: string } {
-  let unclear: string | null = null;
-  let hasPoint = false;
-  let decimal = given.decimal;
-  let thousands = given.thousands;
+  let { decimal, thousands } = given;
+  const either = new Map<string, string>();
+  let hasHundreds = false;
   for (const sample of samples) {
-    const text = plain(sample);
-    if (!/^[+-]?\d[\d.,' ]*$/.test(text)) continue;
-    const marks = text.replace(/[\d+-]/g, '');
-    if (marks === '') continue;
-    if (marks === '.') {
-      hasPoint ||= !/^[+-]?[1-9]\d{0,2}\.\d{3}$/.test(text);
-      continue;
-    }
-    if (marks === ',') {
-      if (/^[+-]?[1-9]\d{0,2},\d{3}$/.test(text)) unclear ??= sample.trim();
-      else decimal ??= ',';
-      continue;
-    }
-    const last = marks[marks.length - 1];
-    const [first] = marks;
-    if (marks.length > 1 && first === last) thousands ??= first as NumberForm['thousands'];
-    else if (last === '.' || last === ',') {
-      decimal ??= last;
-      if (marks.length > 1) thousands ??= first as NumberForm['thousands'];
-    } else thousands ??= last as NumberForm['thousands'];
+    const said = saidBy(plain(sample));
+    decimal ??= said.decimal ?? null;
+    thousands ??= said.thousands ?? null;
+    if (said.either !== undefined && !either.has(said.either)) either.set(said.either, sample);
+    hasHundreds ||= /^[+-]?[1-9]\d\d$/.test(sample);
   }
-  if (unclear !== null && decimal === null && thousands === null) {
-    if (!hasPoint) return { unclear };
-    thousands = ',';
+  const [comma, point] = [either.get(','), either.get('.')];
+  if (decimal === null && thousands === null) {
+    if (comma !== undefined) return { unclear: comma.trim() };
+    // A logger of three decimals writes them throughout.
+    if (point !== undefined && hasHundreds) return { unclear: point.trim() };
   }
-  if (decimal === null) decimal = thousands === '.' ? ',' : '.';
+  decimal ??= thousands === '.' ? ',' : '.';
+  if (decimal === '.' && comma !== undefined) thousands ??= ',';
+  if (decimal === ',' && point !== undefined) thousands ??= '.';
+  if (decimal === thousands) return { unclear: `${decimal} between decimals and thousands` };
   return { decimal, thousands: thousands ?? '' };
+}
+
+interface Said {
+  readonly decimal?: NumberForm['decimal'];
+  readonly thousands?: NumberForm['thousands'];
+  /** A mark that may be either. */
+  readonly either?: NumberForm['decimal'];
+}
+
+/** What one text says of the form. */
+function saidBy(text: string): Said {
+  if (!/^[+-]?\d[\d.,' ]*$/.test(text)) return {};
+  const marks = text.replace(/[\d+-]/g, '') as NumberForm['thousands'];
+  const [first, last] = [marks[0], marks[marks.length - 1]] as NumberForm['thousands'][];
+  if (marks === '.' || marks === ',') {
+    return /^[+-]?[1-9]\d{0,2}.\d{3}$/.test(text) ? { either: marks } : { decimal: marks };
+  }
+  if (marks === '') return {};
+  if (first === last) return { thousands: first };
+  return last === '.' || last === ',' ? { decimal: last, thousands: first } : {};
 }
 
 /** A reader of numbers written in a form; it gives `NaN` for what is none. */

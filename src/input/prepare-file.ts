@@ -96,6 +96,6 @@ function numbersOf(
   return report(findings, place, {
     found: numbers.unclear,
     expected: 'numbers whose decimal mark is clear',
-    hint: 'Say in the job whether the comma marks decimals or thousands: record.decimal: comma, or record.thousands: comma.',
+    hint: 'Say in the job what marks the decimals, record.decimal: point or comma, and what groups the thousands, record.thousands.',
   });
 }

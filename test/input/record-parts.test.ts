@@ -59,19 +59,21 @@ describe('numbers of a record', () => {
     [['1,234.5'], { decimal: '.', thousands: ',' }],
     [['1,250', '12.5'], { decimal: '.', thousands: ',' }],
     [['1,250', '12,5'], { decimal: ',', thousands: '' }],
+    [['1.250', '12,5'], { decimal: ',', thousands: '.' }],
+    [['1.250', '0.512'], PLAIN],
+    [['12.250', '1.005'], PLAIN],
     [['1,234,567'], { decimal: '.', thousands: ',' }],
     [['1.234.567'], { decimal: ',', thousands: '.' }],
     [['1 250,5'], { decimal: ',', thousands: ' ' }],
     [['1’250.5'], { decimal: '.', thousands: "'" }],
   ] as const)('have their form found from %j', (samples, form) => {
-    const { thousands, decimal } = form;
-    const found = numberForm(samples, NONE);
-    // One comma among whole thousands leaves the decimal mark to the other samples.
-    expect(found).toEqual({ decimal, thousands });
+    expect(numberForm(samples, NONE)).toEqual(form);
   });
 
-  it('leave their form open where a comma may be either', () => {
+  it('leave their form open where a mark may be either', () => {
     expect(numberForm(['1,250', '980'], NONE)).toEqual({ unclear: '1,250' });
+    expect(numberForm(['980', '1.250'], NONE)).toEqual({ unclear: '1.250' });
+    expect(numberForm(['12,5', '1,234,567'], NONE)).toHaveProperty('unclear');
     expect(numberForm(['1,250'], { ...NONE, decimal: ',' })).toMatchObject({ decimal: ',' });
   });
 });
