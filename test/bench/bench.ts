@@ -3,6 +3,7 @@ import { countingBench } from './counting.bench-part.ts';
 import type { BenchRow } from './in-turns.ts';
 import { jobsBench } from './jobs.bench-part.ts';
 import { recordsBench } from './records.bench-part.ts';
+import { remediesBench } from './remedies.bench-part.ts';
 import { spacingsBench } from './spacings.bench-part.ts';
 import { sunBench } from './sun.bench-part.ts';
 
@@ -13,6 +14,7 @@ const parts: readonly (readonly [string, () => BenchRow[]])[] = [
   ['Long records, against reading and hashing their bytes', recordsBench],
   ['Comparing spacings, against 2 s', spacingsBench],
   ['Thirty years of sun, against reading the weather file', sunBench],
+  ['Remedies, against the 5 s that they may take', remediesBench],
 ];
 
 for (const [title, part] of parts) {
