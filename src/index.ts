@@ -8,6 +8,8 @@ export { checksCsv } from './output/checks-csv.ts';
 export { cyclesCsv } from './output/cycles-csv.ts';
 export { manifestJson } from './output/manifest-json.ts';
 export { recordCsv } from './output/record-csv.ts';
+export { remediedJobYaml } from './output/remedied-job/remedied-job-yaml.ts';
+export { remediesCsv } from './output/remedies-csv.ts';
 export { resultsCsv } from './output/results-csv.ts';
 export { summary } from './output/summary/summary.ts';
 export { temperaturesText } from './output/temperatures-text.ts';
