@@ -38,8 +38,9 @@ export async function prepareFile(
   if (written === null) return null;
   const wanted = form.mapping && [...form.mapping.entries.keys()];
   const layout = recordLayout(written, wanted, form.layout);
+  const isSure = headerIsSure(layout, form, findings);
   const columns = recordColumns(layout, file.name, form.mapping, findings);
-  if (columns === null) return null;
+  if (columns === null || !isSure) return null;
   const time = columns.filter(({ measure }) => measure === null);
   const channels = columns.filter(({ measure }) => measure !== null);
   const rows = written
@@ -54,6 +55,18 @@ export async function prepareFile(
   const read = timeReader({ order, toNumber }, form);
   const firstTime = rows.map((cells) => read(timeText(cells, time))).find((t) => t !== null);
   return { ...found, order, firstTime: firstTime ?? null };
+}
+
+/** Columns that are all named by number tell nothing of a header, and a first row of data must not pass for one. */
+function headerIsSure(layout: RecordLayout, { mapping, ...form }: RecordForm, findings: Findings) {
+  if (mapping === null || form.layout.headerLine !== null) return true;
+  const names = [...mapping.entries.keys()];
+  if (!names.every((name) => /^\d+$/.test(name) && !layout.headers.includes(name))) return true;
+  report(findings, mapping.place, {
+    found: 'columns named by number alone',
+    expected: 'record.header_line beside them: the line of the header, or none',
+  });
+  return false;
 }
 
 async function firstRows(
