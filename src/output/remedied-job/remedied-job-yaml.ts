@@ -1,4 +1,4 @@
-import { type Document, isScalar, isSeq, parseDocument, YAMLSeq } from 'yaml';
+import { type Document, isMap, isScalar, isSeq, parseDocument, YAMLSeq } from 'yaml';
 import type { Result, Run, RunResult } from '../../model.ts';
 import { fastenerIds, idAmong } from './fastener-ids.ts';
 import { fastenerRow } from './fastener-row.ts';
@@ -38,8 +38,9 @@ export function remediedJobYaml(
     'runs',
     drawn.map((run) => runRow(run, (fastener) => idAmong(fastener, types), units)),
   );
-  // The checks of uneven friction go by the presence of this key.
-  if (!document.has('remedies')) document.set('remedies', document.createNode({}));
+  // Remedies are checked for uneven friction, and a job is where it gives the spread of grips.
+  if (!isMap(document.get('remedies'))) document.set('remedies', document.createNode({}));
+  document.setIn(['remedies', 'grip_spread'], String(job.remedies.gripSpread));
   const text = document.toString({ lineWidth: 0 });
   return `${REMEDIED_MARK}\n${text.replace(new RegExp(`^${REMEDIED_MARK}\n`), '')}`;
 }
