@@ -3,7 +3,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { parseArgs } from 'node:util';
 import { seededRandom } from '../../data/seeded-random.ts';
-import { goodJobs } from './good-jobs.ts';
+import { goodJobs, recordJobs } from './good-jobs.ts';
 import { type Judgement, judge } from './judge.ts';
 import { mutate, pick, type Texts } from './mutate.ts';
 
@@ -21,7 +21,9 @@ const { values } = parseArgs({
   },
 });
 const seed = Number(values.seed);
-const jobs = goodJobs(process.cwd());
+const whole = goodJobs(process.cwd());
+const records = recordJobs(process.cwd());
+const jobs = [...whole, ...records];
 const root = mkdtempSync(join(tmpdir(), 'fuzz-'));
 const ends = { screened: 0, refused: 0, fault: 0 };
 /** How each good job ended. */
@@ -33,7 +35,7 @@ const SLOW = 5000;
 function mutant(number: number) {
   const random = seededRandom(seed * 1_000_003 + number);
   for (let i = 0; i < 8; i++) random();
-  const texts = pick(jobs, random);
+  const texts = pick(random() < 0.7 ? whole : records, random);
   return { texts, job: jobs.indexOf(texts), ...mutate(texts, random) };
 }
 

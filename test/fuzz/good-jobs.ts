@@ -1,3 +1,4 @@
+import { isUtf8 } from 'node:buffer';
 import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { STARTER_JOB } from '../../src/output/starter/starter-job.ts';
@@ -18,9 +19,39 @@ export function goodJobs(root: string): Texts[] {
     textsIn(folder('test/input/jobs/si')),
     textsIn(folder('test/input/jobs/us')),
     fewRuns(textsIn(folder('examples/skerry-landing'))),
+    sunlit(textsIn(folder('examples/larch-yard'))),
     textsIn(folder('test/fuzz/job')),
     { 'job.yaml': STARTER_JOB, 'record.csv': shortened(starterRecord()) },
   ];
+}
+
+/** A small job on each awkward record that the tests hold. */
+export function recordJobs(root: string): Texts[] {
+  const folder = join(root, 'test/records');
+  return readdirSync(folder)
+    .filter((name) => isText(join(folder, name)))
+    .map((name) => {
+      const { 'record.yaml': record, 'clean.csv': _, ...csvs } = textsIn(join(folder, name));
+      const indented = record.replace(/^/gm, '  ').trimEnd();
+      return { ...csvs, 'job.yaml': `record:\n${indented}\n${REST_OF_JOB}` };
+    });
+}
+
+const REST_OF_JOB = `zones: { rail: { column: deck } }
+members: [{ id: rail, modulus: 70 GPa, expansion: 23e-6 / K, area: 450 mm^2 }]
+fasteners: [{ id: bracket, stiffness: 2 kN/mm, shear_resistance: 12 kN }]
+runs: [{ id: R1, member: rail, zone: rail, fastener: bracket, count: 3, spacing: 600 mm, lock_in: 5 degC }]
+`;
+
+/** True where every file of a folder is UTF-8: the others cannot be changed as text. */
+function isText(folder: string): boolean {
+  return readdirSync(folder).every((name) => isUtf8(readFileSync(join(folder, name))));
+}
+
+/** The same job with two of its eight runs. */
+function sunlit(texts: Texts): Texts {
+  const job = texts['job.yaml'].replace(/^ {2}- \{ id: (?:DE|DW|L[ENSW]),.*\n/gm, '');
+  return { ...texts, 'job.yaml': job };
 }
 
 /** The same job with its short runs alone: searching remedies for long ones takes seconds. */
@@ -30,7 +61,7 @@ function fewRuns(texts: Texts): Texts {
 }
 
 function textsIn(folder: string): Texts {
-  const names = readdirSync(folder).filter((name) => /\.(?:csv|yaml)$/.test(name));
+  const names = readdirSync(folder).filter((name) => /\.(?:csv|yaml|epw)$/.test(name));
   const read = (name: string) => shortened(readFileSync(join(folder, name), 'utf8'));
   return Object.fromEntries(names.map((name) => [name, read(name)]));
 }
