@@ -4,6 +4,7 @@ import { open, readFile, stat } from 'node:fs/promises';
 import { resolve } from 'node:path';
 import type { Place } from '../issue.ts';
 import type { InputFile } from '../model.ts';
+import { decodeTable, isWorkbook } from './decode-table.ts';
 import { type Findings, report } from './findings.ts';
 
 /** The files of a job. This is the one place that opens any. */
@@ -41,14 +42,15 @@ export function filesOf(folder: string): Files {
   return {
     inputs,
     async read(name, place, findings) {
-      const bytes = await readFile(resolve(folder, name)).catch((error: NodeJS.ErrnoException) =>
+      const path = resolve(folder, name);
+      const bytes = await readWhole(path).catch((error: NodeJS.ErrnoException) =>
         reportUnread(error, name, place, findings),
       );
       if (bytes === null) return null;
       if (!inputs.some((input) => input.name === name)) {
         inputs.push({ name, sha256: createHash('sha256').update(bytes).digest('hex') });
       }
-      return decode(bytes, name, findings);
+      return decodeTable(bytes, name, findings);
     },
     async open(name, place, findings) {
       const path = resolve(folder, name);
@@ -64,12 +66,27 @@ export function filesOf(folder: string): Files {
   };
 }
 
+/** No job and no table is longer [bytes]; a record may be. */
+const LONGEST_TABLE = 1e8;
+
+async function readWhole(path: string): Promise<Buffer> {
+  if ((await sizeOf(path)) > LONGEST_TABLE) throw codedError(path, 'over 100 MB, no job or table');
+  return readFile(path);
+}
+
 async function sizeOf(path: string): Promise<number> {
   const found = await stat(path);
   // Reading from a pipe or a device may never end.
-  if (!found.isFile()) throw Object.assign(new Error(path), { code: codeOf(found) });
-  await (await open(path)).close();
+  if (!found.isFile()) throw codedError(path, codeOf(found));
+  const file = await open(path);
+  const { buffer } = await file.read(Buffer.alloc(8), 0, 8);
+  await file.close();
+  if (isWorkbook(buffer)) throw codedError(path, 'workbook');
   return found.size;
+}
+
+function codedError(path: string, code: string): NodeJS.ErrnoException {
+  return Object.assign(new Error(path), { code });
 }
 
 function codeOf(found: Stats): string {
@@ -110,17 +127,8 @@ function reportUnread(
     ENOENT: 'There is no file of this name. Names are relative to the job file.',
     EISDIR: 'This is a folder.',
     EACCES: 'You may not read this file.',
+    workbook: 'This is a workbook of a spreadsheet: save the sheet as CSV and name that.',
   };
   const hint = why[error.code ?? ''] ?? `It could not be read (${error.code}).`;
   return report(findings, place, { found: name, expected: 'a file that can be read', hint });
-}
-
-function decode(bytes: Buffer, name: string, findings: Findings): string | null {
-  try {
-    return new TextDecoder('utf-8', { fatal: true }).decode(bytes);
-  } catch {
-    const hint = 'Save the file again as UTF-8.';
-    const found = 'bytes of another encoding';
-    return report(findings, { file: name }, { found, expected: 'text in UTF-8', hint });
-  }
 }
