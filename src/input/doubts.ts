@@ -17,12 +17,21 @@ export function doubtTogether(
 ): void {
   for (const zone of zones) doubtZone(zone, findings);
   for (const member of new Set(runs.map((run) => run.member))) doubtMember(member, findings);
-  for (const run of runs) doubtLockIn(run, findings);
+  const ranges = new Map(zones.map((zone) => [zone.name, rangeOf(zone)]));
+  for (const run of runs) doubtLockIn(run, ranges.get(run.zone.name)!, findings);
 }
+
+/** So many of a record's temperatures tell its median well enough, however long it is. */
+const SAMPLES = 10_000;
 
 function doubtZone({ name, temperature, constant }: Zone, findings: Findings): void {
   if (constant) return;
-  const median = temperature.slice().sort()[temperature.length >> 1];
+  const step = Math.ceil(temperature.length / SAMPLES);
+  const some = Float64Array.from(
+    { length: Math.ceil(temperature.length / step) },
+    (_, i) => temperature[i * step],
+  );
+  const median = some.sort()[some.length >> 1];
   const [low, high] = LIKELY_MEDIAN;
   if (median >= low && median <= high) return;
   findings.warnings.push(WARNINGS.unlikelyTemperature(name, `${Math.round(median)} °C`));
@@ -37,14 +46,23 @@ function doubtMember({ id, area, inertia }: Member, findings: Findings): void {
   findings.warnings.push(WARNINGS.unlikelyInertia(id, `${Number(radius.toPrecision(2))} mm`));
 }
 
-function doubtLockIn({ id, zone, lockIn }: Run, findings: Findings): void {
-  if (zone.constant) return;
+interface Range {
+  readonly low: number;
+  readonly high: number;
+}
+
+function rangeOf({ temperature }: Zone): Range {
   let low = Number.POSITIVE_INFINITY;
   let high = Number.NEGATIVE_INFINITY;
-  for (const temperature of zone.temperature) {
-    low = Math.min(low, temperature);
-    high = Math.max(high, temperature);
+  for (const value of temperature) {
+    if (value < low) low = value;
+    if (value > high) high = value;
   }
+  return { low, high };
+}
+
+function doubtLockIn({ id, zone, lockIn }: Run, { low, high }: Range, findings: Findings): void {
+  if (zone.constant) return;
   if (lockIn >= low - LOCK_IN_MARGIN && lockIn <= high + LOCK_IN_MARGIN) return;
   const range = `${Math.round(low)} to ${Math.round(high)} °C`;
   findings.warnings.push(WARNINGS.lockInFar(id, `${Math.round(lockIn)} °C`, range));
