@@ -245,7 +245,7 @@ export interface Curve {
   readonly of: 'stress' | 'force';
   readonly line: CurveLine;
   readonly below: BelowLast;
-  /** Range at and under which `below` applies: the last point's, or the threshold. */
+  /** Range under which `below` applies: the last point's, or the threshold. */
   readonly limitRange: number;
   /** The member area that the stress is reckoned on. */
   readonly on: 'net' | 'gross';
@@ -420,7 +420,7 @@ export interface Job {
   readonly limits: Limits;
   readonly counting: CountingSettings;
   readonly remedies: RemedySettings;
-  /** Whether fixed fasteners are checked for uneven friction: where the job says anything about remedies. */
+  /** Whether fixed fasteners are checked for uneven friction: where the job gives the grips' spread itself. */
   readonly unevenFriction: boolean;
   readonly curves: readonly Curve[];
   readonly runs: readonly Run[];
@@ -541,7 +541,8 @@ export interface Connection {
   readonly checks: readonly Check[];
   readonly governing: Check | null;
   readonly verdict: Verdict;
-  readonly remedy: string;
+  /** What the run's remedy changes here; `null` for nothing. */
+  readonly change: ConnectionChange | null;
 }
 
 /** Shares of a connection's damage that rest on gaps of the record, 0 … 1; `null` without a curve. */
@@ -633,6 +634,18 @@ export type WarmedRun = Pick<
   RunResult,
   'run' | 'connections' | 'governing' | 'passes' | 'walks' | 'years'
 >;
+
+/** What a remedy changes at one connection as drawn. */
+export interface ConnectionChange {
+  /** Free play each way of the slot that it gets [mm]; `null` where it is fixed. */
+  readonly slot: number | null;
+  /** Whether a slotted fastener becomes a fixed one. */
+  readonly fixed: boolean;
+  /** Width of the joint to its right [mm]; `null` without a new or wider one. */
+  readonly joint: number | null;
+  /** The run's fasteners set anew; `null` where they stay in place. */
+  readonly spacing: { readonly count: number; readonly widest: number } | null;
+}
 
 /** A changed run that was screened again and passes every check that was given. */
 export interface Remedy {

@@ -15,7 +15,7 @@ import { readKeys } from './read-keys.ts';
 import { readRecordBasis } from './record-basis.ts';
 import { readRuns } from './runs.ts';
 import { readCounting, readLimits, readRemedies, readWarming } from './settings.ts';
-import { emptyMap, placeOf, type Source, type SourceMap } from './source.ts';
+import { emptyMap, givenValue, placeOf, type Source, type SourceMap } from './source.ts';
 import { readTable } from './table.ts';
 import { readYaml } from './yaml.ts';
 import { readZones } from './zones.ts';
@@ -99,7 +99,7 @@ async function readWhole(map: SourceMap, files: Files, findings: Findings): Prom
     limits,
     counting,
     remedies,
-    unevenFriction: values.remedies !== null,
+    unevenFriction: givenValue(part('remedies'), 'grip_spread') !== undefined,
     curves: [...curves.items.values()],
     runs,
     inputs: files.inputs,

@@ -320,7 +320,8 @@ export const COUNTING_KEYS = {
     from: 0,
     default: '0 N',
     example: '100 N',
-    meaning: 'Shear ranges of a fastener under this are dropped, and said to be.',
+    meaning:
+      'Shear ranges of a fastener under this, its factors applied, are dropped, and said to be.',
   },
   stress_gate: {
     kind: 'stress',
@@ -328,7 +329,8 @@ export const COUNTING_KEYS = {
     to: 1e6,
     default: '0 MPa',
     example: '2 MPa',
-    meaning: 'Stress ranges of a member under this are dropped, and said to be.',
+    meaning:
+      'Stress ranges of a member under this, its factors applied, are dropped, and said to be.',
   },
   extremes_cycle: {
     kind: 'yes or no',
@@ -665,7 +667,7 @@ export const CURVE_KEYS = {
     to: 1e12,
     needs: 'with `constant` only',
     example: '69 MPa',
-    meaning: 'Range at and under which `below` applies.',
+    meaning: 'Range under which `below` applies.',
   },
   formula: {
     kind: 'text',
@@ -851,7 +853,7 @@ export const REMEDY_KEYS = {
     default: '0.5',
     example: '0.3',
     meaning:
-      'How far grips may lie above and below their value; the fixed fasteners of a slotted run carry what the two sides then differ by.',
+      'How far grips may lie above and below their value: the fixed fasteners of a slotted run carry what the two sides then differ by. Remedies always do; a run as drawn is checked for it where this key is given.',
   },
 } as const satisfies KeyTable;
 

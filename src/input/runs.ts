@@ -1,5 +1,5 @@
 import type { Overhangs, Run } from '../model.ts';
-import { isInGap } from '../temperature/gaps.ts';
+import { coveredHours, isInGap } from '../temperature/gaps.ts';
 import { type Findings, report } from './findings.ts';
 import { jointOf } from './joint.ts';
 import { RUN_KEYS } from './keys.ts';
@@ -40,6 +40,10 @@ function readRun(row: SourceMap, parts: RunParts, findings: Findings): Run | nul
   const roles = rolesOf(values.fixed, positions);
   const fasteners = roles.map((role) => (role === 'fixed' ? fixed : slotted));
   if (joint === null || !fasteners.every((fastener) => fastener !== null)) return null;
+  if (roles.includes('slotted') && slotted?.freePlay === 0) {
+    const expected = `a fastener with free play, which ${slotted.id} has not`;
+    return report(findings, placeOf(row, 'slotted'), { found: slotted.id, expected });
+  }
   const run: Run = {
     id: values.id,
     member,
@@ -59,9 +63,19 @@ function readRun(row: SourceMap, parts: RunParts, findings: Findings): Run | nul
     addedTension: values.added_tension,
     addedShear: values.added_shear,
   };
+  if (isNeverCovered(run, parts)) {
+    const expected = 'a member and a structure zone that are covered together at some time';
+    return report(findings, placeOf(row, 'zone'), { found: run.zone.name, expected });
+  }
   noteLockIn(run, row, values, findings);
   warnOfGap(run, time, parts.clock, findings);
   return run;
+}
+
+/** Whether every hour of the record is a long gap for the run, so that no damage a year can be reckoned. */
+function isNeverCovered({ zone, structure }: Run, { clock }: RunParts): boolean {
+  const zones = structure === null ? [zone] : [zone, structure.zone];
+  return clock !== null && coveredHours(clock.axis, zones) === 0;
 }
 
 /** `positions` are measured from the member's left end, so the first of them is the overhang there unless it is 0. */

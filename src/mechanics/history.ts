@@ -151,6 +151,10 @@ class Follower {
     this.counting = residue === 'repeat';
     this.goToFirstSample(0);
     this.sink.flush();
+    if (residue === 'half') {
+      bookSlides(this.chain);
+      this.slidBefore.set(this.chain.slid);
+    }
     this.counting = true;
     // the first sample itself, which the way there left out of the count or did not move to
     this.sink.take(this.chain);

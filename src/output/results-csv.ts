@@ -1,8 +1,10 @@
 import { stringify } from 'csv-stringify/sync';
 import type { Connection, Result, RunResult } from '../model.ts';
-import { shortSeason } from '../temperature/short-season.ts';
+import { scaledFrom } from '../temperature/short-season.ts';
+import type { UnitSystem } from '../units.ts';
 import { cellNumber } from './number-text.ts';
 import { inUnits, unitOf, type Written } from './quantity.ts';
+import { connectionWords } from './remedies/connection-words.ts';
 
 /**
  * results.csv: one row a connection, in the order of the job.
@@ -15,7 +17,7 @@ export function resultsCsv(result: Result): string {
   const rows = result.runs.flatMap((run) =>
     run.connections.map((connection) =>
       COLUMNS.map(({ quantity, value }) => {
-        const found = value(connection, run);
+        const found = value(connection, run, units);
         if (typeof found === 'string') return found;
         if (found === null || quantity === undefined) return cellNumber(found);
         return cellNumber(inUnits(found, quantity, units));
@@ -32,7 +34,11 @@ interface Column {
   readonly name: string;
   /** Given where the value is in base units and the header names the unit. */
   readonly quantity?: Written;
-  readonly value: (connection: Connection, run: RunResult) => string | number | null;
+  readonly value: (
+    connection: Connection,
+    run: RunResult,
+    units: UnitSystem,
+  ) => string | number | null;
 }
 
 const COLUMNS: readonly Column[] = [
@@ -65,9 +71,9 @@ const COLUMNS: readonly Column[] = [
   { name: 'utilisation', value: (c) => c.governing?.utilisation ?? null },
   { name: 'passes', value: (_, run) => run.passes },
   { name: 'verdict', value: (c) => c.verdict },
-  { name: 'remedy', value: (c) => c.remedy },
+  { name: 'remedy', value: (c, _, units) => connectionWords(c.change, units) },
   // blank where the record is a whole year
-  { name: 'damage_scaled_from [days]', value: (_, run) => shortSeason(run.coveredHours) },
+  { name: 'damage_scaled_from [days]', value: (_, run) => scaledFrom(run) },
   {
     name: 'fastener_damage_filled_share',
     value: (c, run) => run.filledShares()[c.number - 1].fastener,

@@ -1,4 +1,4 @@
-import { shortSeason } from '../temperature/short-season.ts';
+import { scaledFrom } from '../temperature/short-season.ts';
 import type { SpacingComparison } from '../verdict/spacings.ts';
 import { shortNumber } from './number-text.ts';
 import { caseText, lengthText } from './spacings-words.ts';
@@ -39,7 +39,7 @@ function walking({ cases, job: { units } }: SpacingComparison): string[] {
 }
 
 function record({ cases, job }: SpacingComparison): string[] {
-  const days = shortSeason(Math.min(...cases.map(({ rows }) => rows[0].coveredHours)));
+  const days = scaledFrom(...cases.map(({ rows }) => rows[0]));
   return [
     ...(days === null
       ? []

@@ -1,6 +1,6 @@
 import { minerDamage, type SeriesUse } from '../damage/miner.ts';
 import type { Connection, Damage, Demand, Spectrum } from '../model.ts';
-import { shortSeason } from '../temperature/short-season.ts';
+import { scaledFrom } from '../temperature/short-season.ts';
 import { type ConnectionDemands, checksOf } from './checks.ts';
 import { withExtremesCycle } from './extremes-cycle.ts';
 import { judge } from './judge.ts';
@@ -63,7 +63,7 @@ export function assessConnection(
     slidingPerYear: history.slid[i] / years,
     bucklingUtilisation: checks.find(({ check }) => check === 'buckling')?.utilisation ?? null,
     ...judge(checks),
-    remedy: '',
+    change: null,
   };
 }
 
@@ -79,7 +79,7 @@ function demandsOf(
   const drift = history.walks
     ? (Math.abs(history.drift[i]) / scene.years) * job.limits.designLife
     : 0;
-  const days = shortSeason(scene.coveredHours);
+  const days = scaledFrom(scene);
   return {
     ...damages,
     damageFrom: days === null ? '' : `scaled from ${Math.round(days)} days`,

@@ -12,17 +12,18 @@ export interface JointedRun {
 }
 
 /**
- * Checks the gap at the right end of every run that has one, and adds the check to the connection beside it. The runs
- * of one line are neighbours in the order given; a gap without a neighbour closes by its own run's movement alone.
+ * Checks the joint at the right end of every run that has one, and adds the check to the connection beside it. The runs
+ * of one line are neighbours in the order given; a gap without a neighbour closes by its own run's movement alone, and
+ * between neighbours of which no gap is given the check is `not given`.
  *
  * The two ends need not be furthest out at the same time: taking each at its own worst is on the safe side.
  */
 export function withJointGaps<T extends JointedRun>(runs: readonly T[]): T[] {
   return runs.map((one, r) => {
-    if (one.run.gap === null) return one;
     const neighbour = runs
       .slice(r + 1)
       .find(({ run }) => run.line !== null && run.line === one.run.line);
+    if (one.run.gap === null && neighbour === undefined) return one;
     const check = jointGapCheck(one.run, one.ends.right, neighbour?.ends.left ?? null);
     const connections = one.connections.with(-1, withCheck(one.connections.at(-1)!, check));
     return { ...one, connections, governing: governingConnection(connections) };
@@ -39,9 +40,9 @@ function jointGapCheck(run: Run, own: EndMovement, other: EndMovement | null): C
   const slack = structureMovement + run.settingTolerance;
   const closing = together(own.outward, other?.outward, slack);
   const opening = together(own.inward, other?.inward, slack);
-  const gap = run.gap ?? 0;
+  const { gap } = run;
   const closed = compare('joint gap', 'mm', closing, gap);
-  if (cover.kind === 'open') return closed;
+  if (cover.kind === 'open' || gap === null) return closed;
   const further =
     cover.kind === 'lapped'
       ? compare('joint gap', 'mm', opening, cover.lap)

@@ -7,7 +7,6 @@ import { joinRemedies } from './join-remedies.ts';
 import { withJointGaps } from './joint-gaps.ts';
 import { remedyOf } from './remedy.ts';
 import { warmedRuns } from './warmed.ts';
-import { withEndGap } from './with-end-gap.ts';
 import { withVerdicts } from './with-verdicts.ts';
 
 /**
@@ -35,5 +34,5 @@ function remedied(runs: readonly RunResult[], job: Job, tables: DamageTables): R
       ? run
       : { ...run, remedy: remedyOf(run, searchFor(run.run, job, tables)) },
   );
-  return joinRemedies(alone, job, tables).map(withVerdicts).map(withEndGap);
+  return joinRemedies(alone, job, tables).map(withVerdicts);
 }

@@ -1,3 +1,4 @@
+import { rolesOf } from '../input/run-fasteners.ts';
 import type { Role, Run } from '../model.ts';
 import { type Candidate, candidateOf, type Search, tryRun } from './candidate.ts';
 import { withSpacing } from './changed-run.ts';
@@ -19,7 +20,7 @@ export function closerSpacing(run: Run, search: Search): Candidate | null {
 export function closerAndSlotted(run: Run, search: Search): Candidate | null {
   if (!run.fixedType.maySlot) return null;
   for (const closer of closerRuns(run, search)) {
-    const middle = trySlots(closer, middleFixed(closer.positions), search);
+    const middle = trySlots(closer, rolesOf('middle', closer.positions), search);
     if (middle !== null) return fewestSlots(closer, search) ?? middle;
   }
   return null;
@@ -31,7 +32,7 @@ function* closerRuns(run: Run, { job }: Search): Generator<Run> {
   const length = positions[positions.length - 1] - positions[0];
   const tight = !run.roles.includes('slotted');
   const rolesAt = (at: Float64Array): Role[] =>
-    tight ? Array.from(at, () => 'fixed' as const) : middleFixed(at);
+    tight ? Array.from(at, () => 'fixed' as const) : rolesOf('middle', at);
   for (let spans = positions.length; spans < MOST_FASTENERS; spans++) {
     const spacing = length / spans;
     if (spacing < job.remedies.closestSpacing * (1 - 1e-9)) return;
@@ -41,13 +42,3 @@ function* closerRuns(run: Run, { job }: Search): Generator<Run> {
 
 /** As many fasteners as a run may have. */
 const MOST_FASTENERS = 500;
-
-function middleFixed(positions: Float64Array): Role[] {
-  const middle = (positions[0] + positions[positions.length - 1]) / 2;
-  let nearest = 0;
-  for (let i = 1; i < positions.length; i++) {
-    const closer = Math.abs(positions[nearest] - middle) - Math.abs(positions[i] - middle);
-    if (closer > 1e-9 * middle) nearest = i;
-  }
-  return Array.from(positions, (_, i) => (i === nearest ? 'fixed' : 'slotted'));
-}

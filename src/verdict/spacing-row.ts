@@ -37,6 +37,8 @@ export interface SpacingRow {
   /** Shortest life of a connection [years]; `Infinity` is unlimited, `null` where no curve was given. */
   readonly life: number | null;
   readonly coveredHours: number;
+  /** Years that one pass of the record stands for. */
+  readonly years: number;
   /** True where slips had not settled after the last allowed pass. */
   readonly walks: boolean;
 }
@@ -78,6 +80,7 @@ export function spacingRow(
     memberForce: Math.max(...assessed.map(memberForce)),
     life: lives.length === 0 ? null : Math.min(...lives),
     coveredHours: assessed[0].coveredHours,
+    years: assessed[0].years,
     walks: assessed.some(({ walks }) => walks),
   };
 }

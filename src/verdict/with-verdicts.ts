@@ -1,34 +1,42 @@
-import type { Connection, RemediedPiece, Remedy, RunResult } from '../model.ts';
+import type { Connection, ConnectionChange, RemediedPiece, Remedy, RunResult } from '../model.ts';
 
 /** The run with what its remedy comes to at each connection. */
 export function withVerdicts(result: RunResult): RunResult {
   const { remedy, connections } = result;
   if (remedy === null) return result;
+  if (remedy.kind === 'rework') return { ...result, connections: connections.map(reworked(null)) };
   const verdicts =
-    remedy.kind === 'rework' || remedy.added > 0
-      ? reworked
+    remedy.added > 0
+      ? reworked(setAnew(remedy))
       : (one: Connection, i: number) => remediedAt(remedy, one, i);
   return { ...result, connections: connections.map(verdicts) };
 }
 
-/** Where fasteners are added or nothing passes, the connections as drawn have no place of their own any more. */
-function reworked(connection: Connection): Connection {
-  return connection.verdict === 'ok' ? connection : { ...connection, verdict: 'rework' };
+/** Where fasteners are added or nothing passes, a connection as drawn has no place of its own any more. */
+function reworked(change: ConnectionChange | null): (connection: Connection) => Connection {
+  return (connection) =>
+    connection.verdict === 'ok' ? connection : { ...connection, verdict: 'rework', change };
 }
 
-function remediedAt({ pieces, gap }: Remedy, connection: Connection, i: number): Connection {
-  const { piece, place, last } = placeIn(pieces, i);
-  const fastener = piece.run.fasteners[place];
+function setAnew({ pieces }: Remedy): ConnectionChange {
+  const { positions } = pieces[0].run;
+  const widest = positions.slice(1).reduce((most, x, i) => Math.max(most, x - positions[i]), 0);
+  const spacing = { count: positions.length, widest };
+  return { slot: null, fixed: false, joint: null, spacing };
+}
+
+function remediedAt(remedy: Remedy, connection: Connection, i: number): Connection {
+  const { piece, place, last } = placeIn(remedy.pieces, i);
   const slotted = piece.run.roles[place] === 'slotted';
-  const joint = gap !== null && place === piece.run.roles.length - 1 && !last;
-  const words = [
-    ...(slotted ? [`slot, ${fastener.freePlay} mm each way`] : []),
-    ...(joint ? [`joint of ${gap} mm to the right`] : []),
-  ];
+  const atCut = place === piece.run.roles.length - 1;
+  const joint = !atCut ? null : last ? (remedy.endGap ?? null) : remedy.gap;
+  const fixed = !slotted && connection.role === 'slotted';
+  const slot = slotted ? piece.run.fasteners[place].freePlay : null;
+  if (slot === null && !fixed && joint === null) return { ...connection, verdict: 'ok' };
   return {
     ...connection,
-    verdict: joint ? 'joint' : slotted ? 'slot' : 'ok',
-    remedy: words.join('; '),
+    verdict: joint !== null ? 'joint' : slotted ? 'slot' : 'rework',
+    change: { slot, fixed, joint, spacing: null },
   };
 }
 

@@ -105,6 +105,14 @@ describe('a record', () => {
     expect(repeat.forces).toEqual([expect.closeTo(0, 6), ...half.forces]);
   });
 
+  it('slides only where it is counted', () => {
+    const oneWay = follow(slottedRun(250, 50), [0, 1.2e-3], { residue: 'half' }).history;
+    const round = follow(slottedRun(250, 50), [0, 1.2e-3]).history;
+    // there and back is twice the way there, which alone an open record holds
+    expect(oneWay.slid[0]).toBeGreaterThan(0.5);
+    expect(round.slid[0]).toBeCloseTo(2 * oneWay.slid[0], 6);
+  });
+
   it('keeps peaks from lock-in and extremes out of the counted ranges', () => {
     const spec = slottedRun(0, 0);
     const { history, path } = follow(spec, [1e-4, 2e-4], { extremes: [1e-3, -2e-3] });

@@ -228,7 +228,7 @@ function makeRunResult(recipe: RunRecipe, zones: readonly Zone[], axis: RecordAx
     passes: recipe.walks ? 50 : 2,
     walks: recipe.walks ?? false,
     driftPerYear: recipe.walks ? 0.8 : 0,
-    years: 1,
+    years: axis.times.length < 8400 ? axis.times.length / 8766 : 1,
     coveredHours: axis.times.length,
     connections,
     ends: { left: END, right: END },
@@ -328,7 +328,7 @@ function makeConnection(
     checks,
     governing,
     verdict: checks.some((c) => c.status === 'fail') ? 'fails' : 'ok',
-    remedy: '',
+    change: null,
   };
 }
 

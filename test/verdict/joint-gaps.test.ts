@@ -122,7 +122,7 @@ runs:
     expect(a.remedy).toMatchObject({ kind: 'joints', joints: 0, endGap: Math.ceil(closing) });
     expect(a.connections.at(-1)).toMatchObject({
       verdict: 'joint',
-      remedy: `joint of ${Math.ceil(closing)} mm to the right`,
+      change: { joint: Math.ceil(closing) },
     });
     expect(a.remedy.utilisation).toBeCloseTo(closing / Math.ceil(closing), 2);
   });

@@ -1,5 +1,5 @@
 import type { Job, RunResult } from '../../model.ts';
-import { shortSeason } from '../../temperature/short-season.ts';
+import { scaledFrom } from '../../temperature/short-season.ts';
 import { connectionName } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
 import type { Chart } from './chart.ts';
@@ -133,8 +133,8 @@ function subtitle(parts: readonly CurvePart[], job: Job): string {
 }
 
 /** The days that the damage was scaled from where the record is no whole year. */
-function scaled({ coveredHours }: RunResult): string {
-  const days = shortSeason(coveredHours);
+function scaled(run: RunResult): string {
+  const days = scaledFrom(run);
   return days === null ? '' : `, scaled from ${shortNumber(days)} days`;
 }
 

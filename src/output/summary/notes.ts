@@ -1,5 +1,5 @@
 import type { Result } from '../../model.ts';
-import { shortSeason } from '../../temperature/short-season.ts';
+import { scaledFrom } from '../../temperature/short-season.ts';
 import { amount, runNames } from '../names.ts';
 import { grouped, shortNumber } from '../number-text.ts';
 import { bullet, wrap } from './text-layout.ts';
@@ -10,6 +10,7 @@ export function notes(result: Result): string[] {
     ...walking(result),
     ...record(result),
     ...gated(result),
+    ...unevenFriction(result),
     'Left out: bending of the member from fasteners off its axis.',
     'Left out: torsional, local and distortional buckling.',
     'Forces, stresses and ranges are unfactored; damage and static checks carry the factors of the job.',
@@ -36,7 +37,7 @@ function walking({ job, runs }: Result): string[] {
 }
 
 function record({ job, runs }: Result): string[] {
-  const days = shortSeason(Math.min(...runs.map((run) => run.coveredHours)));
+  const days = scaledFrom(...runs);
   const part =
     days === null
       ? []
@@ -66,6 +67,19 @@ function extremesCycleLines({ job, runs }: Pick<Result, 'job' | 'runs'>): string
     pairs.set(text, [...(pairs.get(text) ?? []), run.id]);
   }
   return [...pairs].map(([text, ids]) => `${text} ${runNames(ids, runs.length)}.`);
+}
+
+/** Slots whose fixed fasteners were not checked for what grips may differ by. */
+function unevenFriction({ job, runs }: Result): string[] {
+  const mixed = runs.filter(({ run: { roles } }) => new Set(roles).size > 1);
+  if (job.unevenFriction || mixed.length === 0) return [];
+  const ids = runNames(
+    mixed.map(({ run }) => run.id),
+    runs.length,
+  );
+  return [
+    `Left out: uneven friction of the slots on the fixed fasteners of ${ids}; give remedies.grip_spread to have it checked. Remedies are always checked for it.`,
+  ];
 }
 
 function gated({ runs }: Result): string[] {

@@ -1,5 +1,5 @@
 import type { Connection, Result, RunResult } from '../../model.ts';
-import { shortSeason } from '../../temperature/short-season.ts';
+import { scaledFrom } from '../../temperature/short-season.ts';
 import type { UnitSystem } from '../../units.ts';
 import { shortestLife } from '../life-text.ts';
 import { amount, connectionName } from '../names.ts';
@@ -53,8 +53,9 @@ const REMEDY_WORDS = {
 } as const;
 
 /** The shortest life, and the days that it was scaled from where the record is no whole year. */
-function life({ connections, coveredHours }: RunResult): string {
-  const days = shortSeason(coveredHours);
+function life(run: RunResult): string {
+  const { connections } = run;
+  const days = scaledFrom(run);
   const scaled = days === null ? '' : `, from ${shortNumber(days)} days`;
   return `${shortestLife(connections)}${connections.some(isLimited) ? scaled : ''}`;
 }

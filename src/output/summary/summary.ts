@@ -1,5 +1,5 @@
 import type { Result, RunResult } from '../../model.ts';
-import { shortSeason } from '../../temperature/short-season.ts';
+import { scaledFrom } from '../../temperature/short-season.ts';
 import { connectionName } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
 import { unitOf } from '../quantity.ts';
@@ -66,7 +66,8 @@ function answer(result: Result): string {
 function remedied(runs: readonly RunResult[]): string {
   const found = runs.filter(({ remedy }) => remedy !== null && remedy.kind !== 'rework').length;
   const open = runs.filter(({ remedy }) => remedy?.kind === 'rework').map(({ run }) => run.id);
-  const passes = found === 0 ? '' : `A changed drawing passes for ${found}, see below.`;
+  const which = found === 1 && open.length === 0 ? '' : ` for ${found} of them`;
+  const passes = found === 0 ? '' : `A changed drawing passes${which}, see below.`;
   const rest = open.length === 0 ? '' : `${open.join(', ')} must be reworked.`;
   return `${passes} ${rest}`.trim();
 }
@@ -81,7 +82,7 @@ function governs({ runs, governing }: Result): string {
 
 /** The days that damage was scaled from where the record is no whole year. */
 function scaledText({ runs }: Result): string {
-  const days = shortSeason(Math.min(...runs.map(({ coveredHours }) => coveredHours)));
+  const days = scaledFrom(...runs);
   return days === null ? '' : `, scaled from ${shortNumber(days)} days`;
 }
 
