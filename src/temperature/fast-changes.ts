@@ -35,6 +35,7 @@ export function fastChanges(
 ): FastChanges {
   const spikes: Stretch[] = [];
   const jumps: number[] = [];
+  if (isCalm(values, limits.over)) return { spikes, jumps };
   let before = nextValue(values, 0);
   for (let at = nextValue(values, before + 1); at < values.length; ) {
     let behind = at;
@@ -50,6 +51,14 @@ export function fastChanges(
     at = nextValue(values, behind + 1);
   }
   return { spikes, jumps };
+}
+
+/** Whether no two neighbours are further apart than `over` and none is missing: nothing can be fast then. */
+function isCalm(values: Float64Array, over: number): boolean {
+  for (let i = 1; i < values.length; i++) {
+    if (!(Math.abs(values[i] - values[i - 1]) <= over)) return false;
+  }
+  return true;
 }
 
 /** The sample that brings a fast change back, and the last one of the spike before it; `null` where none does. */

@@ -63,6 +63,8 @@ function alike(step: number, other: number): boolean {
 
 /** The lower median; steps are few different ones mostly, so they are counted and not sorted. */
 function medianStep(times: Float64Array): number {
+  const common = usualStep(times);
+  if (common !== null) return common;
   const counts = new Map<number, number>();
   for (let i = 1; i < times.length; i++) {
     const step = times[i] - times[i - 1];
@@ -76,4 +78,12 @@ function medianStep(times: Float64Array): number {
     if (before > half) return step;
   }
   return Number.NaN;
+}
+
+/** The step that more than half of all are, and so the median; `null` where none is. Nearly every record has one. */
+function usualStep(times: Float64Array): number | null {
+  const step = times[1] - times[0];
+  let count = 0;
+  for (let i = 1; i < times.length; i++) if (times[i] - times[i - 1] === step) count++;
+  return 2 * count > times.length - 1 ? step : null;
 }

@@ -22,12 +22,15 @@ export function stuckStretches(
   times: Float64Array,
   longerThan: number,
 ): Stretch[] {
-  const counts = new Map<number, number>();
   const long: Stretch[] = [];
+  throughStretches(values, (first, last) => {
+    if (times[last] - times[first] > longerThan) long.push({ first, last });
+  });
+  if (long.length === 0) return long;
+  const counts = new Map<number, number>();
   throughStretches(values, (first, last) => {
     const lasts = times[last] - times[first];
     counts.set(lasts, (counts.get(lasts) ?? 0) + 1);
-    if (lasts > longerThan) long.push({ first, last });
   });
   const usual = usualOf(counts);
   return long.filter(({ first, last }) => times[last] - times[first] > TIMES_USUAL * usual);
