@@ -128,7 +128,9 @@ describe('the summary', () => {
     );
     expect(text).toContain(`utilisation ${before} → ${after}`);
     expect(text).toMatch(/B: (\d+) fasteners at [\d.]+ mm in place of 5 fasteners at 400 mm/);
-    expect(text).toContain('A changed drawing passes for 3, see below. N must be reworked.');
+    expect(text).toContain(
+      'A changed drawing passes for 3 of them, see below. N must be reworked.',
+    );
     expect(text).toContain(
       'No grip in a slot was given for bare: such slots were taken as frictionless but for 1 N.',
     );
