@@ -25,7 +25,7 @@ export function schemeWords(
     ...spacingWords(run.positions, remedy, units),
     ...(changed.slotted.length > 0 ? [slotted] : []),
     ...(changed.fixed.length > 0 ? [`fix ${names(changed.fixed)}`] : []),
-    ...slotWords(remedy, units),
+    ...(Object.values(changed).some(({ length }) => length > 0) ? slotWords(remedy, units) : []),
     ...(remedy.endGap === undefined
       ? []
       : [`widen the gap at its right end to ${drawnLength(remedy.endGap, units)}`]),

@@ -62,14 +62,21 @@ function answer(result: Result): string {
   return [verdict, remedied(runs), governs(result)].filter((text) => text !== '').join(' ');
 }
 
-/** How many failing runs have a remedy, and which have none; blank where none was looked for. */
+/** How many failing runs have a remedy, what changes beside them, and which have none; blank where none was looked for. */
 function remedied(runs: readonly RunResult[]): string {
-  const found = runs.filter(({ remedy }) => remedy !== null && remedy.kind !== 'rework').length;
+  const changed = runs.filter(({ remedy }) => remedy !== null && remedy.kind !== 'rework');
+  const found = changed.filter(runFails).length;
+  const beside = changed.filter((run) => !runFails(run)).map(({ run }) => run.id);
   const open = runs.filter(({ remedy }) => remedy?.kind === 'rework').map(({ run }) => run.id);
-  const which = found === 1 && open.length === 0 ? '' : ` for ${found} of them`;
-  const passes = found === 0 ? '' : `A changed drawing passes${which}, see below.`;
-  const rest = open.length === 0 ? '' : `${open.join(', ')} must be reworked.`;
-  return `${passes} ${rest}`.trim();
+  const which =
+    found === runs.filter(runFails).length && found === 1 ? '' : ` for ${found} of them`;
+  return [
+    ...(found === 0 ? [] : [`A changed drawing passes${which}, see below.`]),
+    ...(beside.length === 0
+      ? []
+      : [`Beside changed runs the gap must be wider at ${beside.join(', ')}.`]),
+    ...(open.length === 0 ? [] : [`${open.join(', ')} must be reworked.`]),
+  ].join(' ');
 }
 
 function governs({ runs, governing }: Result): string {
