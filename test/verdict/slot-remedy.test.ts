@@ -29,7 +29,8 @@ function bruteForce(run: Run, job: Job): Fewest | null {
     const assess = (travel: number) =>
       assessConnections(withRoles(run, roles, slotType(run, travel, job.remedies)), uneven, tables)
         .connections;
-    const ample = assess(job.remedies.longestTravel);
+    // so long that no bolt bears at the end of its slot
+    const ample = assess(3 * job.remedies.longestTravel);
     if (ample.some(({ verdict }) => verdict !== 'ok')) continue;
     const slips = ample.map(({ role, slipPeak }) => (role === 'slotted' ? slipPeak : 0));
     const needed = slots === 0 ? 0 : Math.max(...slips) + run.settingTolerance;
