@@ -1,16 +1,15 @@
 import { rolesOf } from '../input/run-fasteners.ts';
-import type { Role, Run } from '../model.ts';
+import type { Run } from '../model.ts';
 import { type Candidate, candidateOf, type Search, tryRun } from './candidate.ts';
 import { withSpacing } from './changed-run.ts';
 import { fewestSlots, trySlots } from './slot-remedy.ts';
 
 /** The fewest added fasteners with which a run passes as it is arranged; `null` where none do. */
 export function closerSpacing(run: Run, search: Search): Candidate | null {
-  for (const closer of closerRuns(run, search)) {
+  return fewestAdded(run, search, (closer) => {
     const assessment = tryRun(closer, search);
-    if (assessment !== null) return candidateOf(assessment, 0);
-  }
-  return null;
+    return assessment && candidateOf(assessment, 0);
+  });
 }
 
 /**
@@ -19,26 +18,53 @@ export function closerSpacing(run: Run, search: Search): Candidate | null {
  */
 export function closerAndSlotted(run: Run, search: Search): Candidate | null {
   if (!run.fixedType.maySlot) return null;
-  for (const closer of closerRuns(run, search)) {
-    const middle = trySlots(closer, rolesOf('middle', closer.positions), search);
-    if (middle !== null) return fewestSlots(closer, search) ?? middle;
+  const middle = fewestAdded(run, search, (closer) =>
+    trySlots(closer, rolesOf('middle', closer.positions), search),
+  );
+  if (middle === null) return null;
+  const { positions } = middle.assessment.run;
+  const tight = withSpacing(run, positions[1] - positions[0], (at) => rolesOf('all', at));
+  return fewestSlots(tight, search) ?? middle;
+}
+
+/** How much closer each try is than the one before. */
+const CLOSER = 1.1;
+/** As many fasteners as a run may have. */
+const MOST_FASTENERS = 500;
+
+/**
+ * The first of ever closer spacings that passes, and then the widest that does between it and the last that failed: a
+ * closer spacing raises the flexural resistance faster than anything else it does.
+ */
+function fewestAdded(
+  run: Run,
+  { job }: Search,
+  attempt: (closer: Run) => Candidate | null,
+): Candidate | null {
+  const { positions } = run;
+  const length = positions[positions.length - 1] - positions[0];
+  const most = Math.min(
+    MOST_FASTENERS - 1,
+    Math.floor((length / job.remedies.closestSpacing) * (1 + 1e-9)),
+  );
+  const withSpans = (spans: number) =>
+    attempt(withSpacing(run, length / spans, (at) => rolesOf(arrangement, at)));
+  const arrangement = run.roles.includes('slotted') ? 'middle' : 'all';
+  let failing = positions.length - 1;
+  while (failing < most) {
+    let passing = Math.min(most, Math.ceil(failing * CLOSER));
+    let found = withSpans(passing);
+    if (found === null) {
+      failing = passing;
+      continue;
+    }
+    while (passing - failing > 1) {
+      const between = (failing + passing) >> 1;
+      const candidate = withSpans(between);
+      if (candidate === null) failing = between;
+      else [passing, found] = [between, candidate];
+    }
+    return found;
   }
   return null;
 }
-
-/** The run at ever closer spacings, one more span each time, all fixed where it was, else fixed at the middle. */
-function* closerRuns(run: Run, { job }: Search): Generator<Run> {
-  const { positions } = run;
-  const length = positions[positions.length - 1] - positions[0];
-  const tight = !run.roles.includes('slotted');
-  const rolesAt = (at: Float64Array): Role[] =>
-    tight ? Array.from(at, () => 'fixed' as const) : rolesOf('middle', at);
-  for (let spans = positions.length; spans < MOST_FASTENERS; spans++) {
-    const spacing = length / spans;
-    if (spacing < job.remedies.closestSpacing * (1 - 1e-9)) return;
-    yield withSpacing(run, spacing, rolesAt);
-  }
-}
-
-/** As many fasteners as a run may have. */
-const MOST_FASTENERS = 500;
