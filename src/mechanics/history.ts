@@ -111,7 +111,9 @@ class Follower {
     this.chain = chain;
     this.path = path;
     this.counter = counter;
-    this.sink = new RowSink(count, (sink) => this.takeBlock(sink));
+    // every joint may turn once on every leg
+    const rows = path.turns.length * (count + 1);
+    this.sink = new RowSink(count, (sink) => this.takeBlock(sink), rows);
     this.spans = new Float64Array(this.sink.capacity * (count - 1));
     this.countedShear = createEnvelope(count);
     this.countedSpans = createEnvelope(count - 1);

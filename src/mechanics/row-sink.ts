@@ -17,10 +17,11 @@ export class RowSink {
   rows = 0;
   private readonly onBlock: (sink: RowSink) => void;
 
-  constructor(columns: number, onBlock: (sink: RowSink) => void) {
+  /** @param expected about how many rows there will be: a short way needs no large block */
+  constructor(columns: number, onBlock: (sink: RowSink) => void, expected = 4096) {
     this.columns = columns;
     // some 256 KiB a block stay in the cache while every column is counted
-    this.capacity = Math.min(4096, Math.max(64, Math.floor(32_768 / columns)));
+    this.capacity = Math.max(64, Math.min(expected, 4096, Math.floor(32_768 / columns)));
     this.values = new Float64Array(this.capacity * columns);
     this.ends = new Float64Array(this.capacity * 2);
     this.marks = new Float64Array(this.capacity);

@@ -17,7 +17,10 @@ export function joinRemedies(
   job: Job,
   tables: DamageTables,
 ): RunResult[] {
-  if (runs.every(({ remedy }) => !isFound(remedy))) return [...runs];
+  const settled = runs.every(
+    ({ remedy, connections }) => !isFound(remedy) && !connections.some(failsGap),
+  );
+  if (settled) return [...runs];
   const drawn = runs.map((run) => piecesOf(run, job, tables));
   const widened = drawn.map((pieces, r) => widenLast(pieces, drawn.slice(r + 1).flat(), job));
   const joined = withJointGaps(widened.flat());

@@ -30,9 +30,14 @@ export function screen(job: Job, options: { readonly remedies?: boolean } = {}):
 
 function remedied(runs: readonly RunResult[], job: Job, tables: DamageTables): RunResult[] {
   const alone = runs.map((run) =>
-    run.connections.every(({ verdict }) => verdict === 'ok')
-      ? run
-      : { ...run, remedy: remedyOf(run, searchFor(run.run, job, tables)) },
+    failsByItself(run) ? { ...run, remedy: remedyOf(run, searchFor(run.run, job, tables)) } : run,
   );
   return joinRemedies(alone, job, tables).map(withVerdicts);
+}
+
+/** Whether anything but the joint to its neighbour fails, which is mended where runs are looked at beside each other. */
+function failsByItself({ connections }: RunResult): boolean {
+  return connections.some(({ checks }) =>
+    checks.some(({ check, status }) => status === 'fail' && check !== 'joint gap'),
+  );
 }

@@ -82,6 +82,11 @@ describe('a joint gap', () => {
     expect(gapCheck([runOf({ gap: 20 }), other, neighbour])).toMatchObject({ demand: 11 });
   });
 
+  it('is not given between neighbours where no gap is', () => {
+    const [left] = withJointGaps([runOf({ gap: null }), neighbour]);
+    expect(left.connections[0].checks[0]).toMatchObject({ status: 'not given', limit: null });
+  });
+
   it('is not checked where none is given', () => {
     expect(withJointGaps([neighbour])[0].connections[0].checks).toEqual([]);
   });
@@ -132,5 +137,31 @@ runs:
     const [a] = await screened(40, ', joint: lapped, lap: 2 mm');
     expect(a.remedy).toMatchObject({ kind: 'rework', at: 'A/6', check: { check: 'joint gap' } });
     expect(a.connections.at(-1)!.verdict).toBe('rework');
+  });
+});
+
+describe('a slotted run of which only the gap fails', () => {
+  it('keeps its slots and gets a wider gap', async () => {
+    const job = await jobOf({
+      'record.csv': csvRecord(Date.UTC(2031, 0, 1), 48, {
+        'rail [degC]': (hour) => 20 - 20 * Math.cos((2 * Math.PI * hour) / 24),
+      }),
+      'job.yaml': `
+record: { file: record.csv }
+zones: { rail: { column: rail } }
+members: [{ id: rail, modulus: 70 GPa, expansion: 23e-6 / K, area: 450 mm^2 }]
+fasteners:
+  - { id: pin, stiffness: 20 kN/mm }
+  - { id: slot, stiffness: 20 kN/mm, free_play: 12 mm, grip: 10 N }
+runs:
+  - { id: A, member: rail, zone: rail, fastener: pin, slotted: slot, fixed: first, count: 6, spacing: 1500 mm, lock_in: 0 degC, gap: 2 mm }
+`,
+    });
+    const [run] = screen(job).runs;
+    if (run.remedy === null || run.remedy.kind === 'rework') throw new Error('no remedy');
+    // αθL = 23e-6 × 40 × 7500 = 6.9 mm from the fixed end
+    expect(run.remedy).toMatchObject({ kind: 'joints', slots: 5, endGap: 7 });
+    expect(run.remedy.pieces[0].run.roles).toEqual(run.run.roles);
+    expect(run.connections[5]).toMatchObject({ verdict: 'joint', change: { joint: 7 } });
   });
 });
