@@ -43,7 +43,7 @@ function valueHint(text: string, isTemperature: boolean): string {
   if (/^[+-]?\d[\d.,' ]*[.,' ][\d]+$/.test(text) && !isTemperature) {
     return 'Say how numbers are written, such as record.decimal: comma and record.thousands: point.';
   }
-  const missing = `If this stands for a missing value, say so: record.missing: [${text}].`;
+  const missing = `If this stands for a missing value, say so: record.missing: [${quoted(text)}].`;
   if (!isTemperature) return missing;
   return `${missing} If it is right, widen record.band; its rule may leave such values out.`;
 }
@@ -63,4 +63,9 @@ function missingMark(
   const some = numbers.size > 0;
   return (text, number) =>
     Number.isNaN(number) ? words.has(text.trim().toLowerCase()) : some && numbers.has(number);
+}
+
+/** The text as YAML takes for one value: a decimal comma would part it into two. */
+function quoted(text: string): string {
+  return /^[\w.-]+$/.test(text) ? text : `'${text.replaceAll("'", "''")}'`;
 }

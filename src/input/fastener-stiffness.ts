@@ -21,7 +21,14 @@ export function stiffnessOf(
   const { stiffness, shear_displacement: displaced, per_connection: n } = values;
   const alone = stiffness === 'rigid' ? null : (stiffness ?? displaced);
   const bracket = bracketOf(values);
-  if (bracket === null) return alone;
+  if (bracket === null) {
+    if (displaced !== null) {
+      const how = 'force over shear_displacement';
+      const key = `${prefix}stiffness`;
+      findings.derived.push({ key, value: displaced, quantity: 'stiffness', how });
+    }
+    return alone;
+  }
   const value = 1 / ((alone === null ? 0 : 1 / alone) + n / bracket.stiffness);
   const share = n === 1 ? 'its bracket' : `its share, 1 of ${n}, of the bracket`;
   findings.derived.push({

@@ -25,18 +25,6 @@ export interface RecordForm {
   readonly mapping: SourceMap | null;
 }
 
-/** Everything to be found: the plain form. */
-export const PLAIN_FORM: RecordForm = {
-  encoding: null,
-  layout: { separator: null, headerLine: null, dataLine: null },
-  numbers: { decimal: null, thousands: null },
-  missing: [],
-  order: null,
-  timeNumbers: null,
-  zone: null,
-  mapping: null,
-};
-
 const SEPARATORS = { comma: ',', semicolon: ';', tab: '\t', bar: '|' } as const;
 const DECIMALS = { point: '.', comma: ',' } as const;
 const THOUSANDS = { none: '', comma: ',', point: '.', space: ' ', apostrophe: "'" } as const;

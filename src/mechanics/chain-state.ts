@@ -82,7 +82,7 @@ const RIGID = 1e6;
 /** A slipping joint's tangent as a multiple of the smaller of k and the softest span. */
 const SLIP_TANGENT = 1e-9;
 /** Least grip of a joint with free play [N]. */
-const LEAST_GRIP = 1;
+export const LEAST_GRIP = 1;
 
 /**
  * A chain at lock-in: no strain, no force, every bolt centred. Its rates are not solved yet.

@@ -132,7 +132,7 @@ function slotTravelCheck(demands: ConnectionDemands, fastener: Fastener): Check 
   const travel = { value: value + demands.settingTolerance, when };
   const check = compare('slot travel', 'mm', travel, fastener.freePlay);
   const bears = value >= fastener.freePlay * (1 - ROUNDING);
-  return bears ? { ...check, status: 'fail' } : check;
+  return bears ? { ...check, status: 'fail', when: `${when}, where it bears` } : check;
 }
 
 function bucklingCheck({ compression }: ConnectionDemands, limits: Limits): Check | null {

@@ -1,7 +1,7 @@
 import type { Role } from '../model.ts';
 
 /** Runs of up to this many fasteners are searched over all sets. */
-const ALL_SETS = 12;
+export const ALL_SETS = 12;
 /** Runs of up to this many are searched over every contiguous block of fixed fasteners. */
 export const EVERY_BLOCK = 60;
 

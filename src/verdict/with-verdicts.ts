@@ -31,11 +31,13 @@ function remediedAt(remedy: Remedy, connection: Connection, i: number): Connecti
   const atCut = place === piece.run.roles.length - 1;
   const joint = !atCut ? null : last ? (remedy.endGap ?? null) : remedy.gap;
   const fixed = !slotted && connection.role === 'slotted';
-  const slot = slotted ? piece.run.fasteners[place].freePlay : null;
+  const freePlay = slotted ? piece.run.fasteners[place].freePlay : null;
+  const kept = connection.role === 'slotted' && connection.fastener.freePlay === freePlay;
+  const slot = kept ? null : freePlay;
   if (slot === null && !fixed && joint === null) return { ...connection, verdict: 'ok' };
   return {
     ...connection,
-    verdict: joint !== null ? 'joint' : slotted ? 'slot' : 'rework',
+    verdict: joint !== null ? 'joint' : slot !== null ? 'slot' : 'rework',
     change: { slot, fixed, joint, spacing: null },
   };
 }

@@ -153,7 +153,8 @@ function linearTicks(top: number) {
 
 /** Passing points are open, failing ones filled diamonds; a dense run is a line alone. */
 function useLine(points: Point[], yAxisID: string) {
-  const fails = points.map(({ y }) => y > 1);
+  // a bolt at the end of its slot fails at a utilisation of 1
+  const fails = points.map(({ y }) => y >= 1);
   return line(points, {
     yAxisID,
     pointRadius: points.length > MOST_SHAPES ? 0 : points.length > 40 ? 3.5 : 4.5,
@@ -180,7 +181,7 @@ function governingLabels(view: View, drawn: (point: Point) => Point, x: number):
   const { governing } = view.governing;
   const y = governing?.utilisation ?? 0;
   const text = governing === null ? 'nothing to check' : `${governing.check} ${shortNumber(y)}`;
-  const colour = y > 1 ? COLOUR.limit : COLOUR.demand;
+  const colour = governing?.status === 'fail' ? COLOUR.limit : COLOUR.demand;
   const label = edgeLabel(text, view.use, drawn({ x, y }), colour);
   if (governing === null) return [label];
   const { group: _, ...untied } = label;

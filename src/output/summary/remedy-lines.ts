@@ -1,5 +1,7 @@
+import { LEAST_GRIP } from '../../mechanics/chain-state.ts';
 import type { Fastener, Remedy, Result, Rework, RunResult } from '../../model.ts';
 import type { UnitSystem } from '../../units.ts';
+import { ALL_SETS } from '../../verdict/role-sets.ts';
 import { amount } from '../names.ts';
 import { shortNumber } from '../number-text.ts';
 import { changeWords, reworkWords, schemeWords } from '../remedies/remedy-words.ts';
@@ -43,6 +45,7 @@ export function remedyAssumptions({ job, runs }: Result): string[] {
     'A slot covers the travel found and the setting tolerance, each way from its centre, and is rounded up as the job says.',
     `Grips may lie ${shortNumber(100 * remedies.gripSpread)} % above or below their value: the fixed fasteners of a slotted run carry what its two sides then differ by.`,
     ...gripPoints(remedied, units),
+    "Left out: whether a slot fits beside the member's edges and its end, where the last fastener of a run is slotted.",
     ...(longest
       ? [
           `Runs of more than ${ALL_SETS} fasteners were tried with their fixed fasteners side by side only.`,
@@ -57,12 +60,6 @@ type Remedied = RunResult & { readonly remedy: Remedy };
 function isRemedied({ remedy }: RunResult): boolean {
   return remedy !== null && remedy.kind !== 'rework';
 }
-
-/** Runs of up to this many fasteners are searched over all sets of fixed ones. */
-const ALL_SETS = 12;
-
-/** Under this a grip in a slot counts as this [N]. */
-const LEAST_GRIP = 1;
 
 /** The grip that each kind of fastener was given in a new slot. */
 function gripPoints(runs: readonly Remedied[], units: UnitSystem): string[] {
