@@ -89,6 +89,23 @@ export function followRecord(
   };
 }
 
+/**
+ * Takes a run through its record once more after `followRecord`, for another way of counting.
+ *
+ * @param chain the run as it is after a pass; left as it is after the next
+ * @param path way of the mismatch strain
+ * @param residue how the record is counted
+ * @param counter receives the forces of the pass
+ */
+export function passAgain(
+  chain: Chain,
+  path: StrainPath,
+  residue: Residue,
+  counter: PassCounter,
+): void {
+  new Follower(chain, path, counter).nextPass(residue);
+}
+
 /** The chain on its way, and the envelopes that its forces fill. */
 class Follower {
   private readonly chain: Chain;

@@ -13,9 +13,15 @@ export interface Thermal {
  * ε = α·(T − T_lock-in) − α_s·(T_s − T_s,lock-in).
  */
 export function mismatchStrain(member: Thermal, structure: Thermal | null): Float64Array {
-  const strain = member.temperature.map((t) => member.expansion * (t - member.lockIn));
+  const strain = thermalStrain(member);
   if (structure === null) return strain;
-  const { temperature, expansion, lockIn } = structure;
-  for (let i = 0; i < strain.length; i++) strain[i] -= expansion * (temperature[i] - lockIn);
+  const behind = thermalStrain(structure);
+  for (let i = 0; i < strain.length; i++) strain[i] -= behind[i];
+  return strain;
+}
+
+function thermalStrain({ temperature, expansion, lockIn }: Thermal): Float64Array {
+  const strain = new Float64Array(temperature.length);
+  for (let i = 0; i < strain.length; i++) strain[i] = expansion * (temperature[i] - lockIn);
   return strain;
 }

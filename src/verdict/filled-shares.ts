@@ -1,6 +1,6 @@
 import { minerDamage } from '../damage/miner.ts';
 import type { Chain } from '../mechanics/chain.ts';
-import { followRecord } from '../mechanics/history.ts';
+import { passAgain } from '../mechanics/history.ts';
 import type { StrainPath } from '../mechanics/strain-path.ts';
 import type { Connection, FilledShare } from '../model.ts';
 import { gapEdges } from '../temperature/gap-edges.ts';
@@ -31,10 +31,13 @@ export function filledShares(
   const { run, job } = scene;
   const zones = run.structure === null ? [run.zone] : [run.zone, run.structure.zone];
   const edges = gapEdges(job.axis, zones);
-  const sure =
-    edges !== null && path.turns.some((turn) => edges[turn] === 1)
-      ? { ...scene, counters: countAway(edges, scene, chain, path) }
-      : scene;
+  if (edges === null || path.turns.every((turn) => edges[turn] === 0)) {
+    return connections.map(({ fastenerDamage, memberDamage }) => ({
+      fastener: shareOf(fastenerDamage.sum, fastenerDamage.sum),
+      member: shareOf(memberDamage.sum, memberDamage.sum),
+    }));
+  }
+  const sure = { ...scene, counters: countAway(edges, scene, chain, path) };
   return connections.map(({ fastenerDamage, memberDamage }, i) => {
     const span = worseSpan(spans, i);
     const member = span && minerDamage(spanSpectrum(sure, span.index), memberUse(sure));
@@ -55,25 +58,20 @@ function countAway(edges: Uint8Array, { run, job }: RunScene, chain: Chain, path
     const isTurn = Math.abs(mark - Math.round(mark)) < ROUNDING && turn >= 0;
     return !isTurn || edges[path.turns[turn]] === 0;
   };
-  followRecord(
-    chain,
-    path,
-    { extremes: [], residue: job.counting.residue },
-    {
-      begin: () => counters.begin(),
-      take(shears, spans, rows, marks) {
-        for (let from = 0; from < rows; from++) {
-          if (!isSure(marks[from])) continue;
-          let to = from + 1;
-          while (to < rows && isSure(marks[to])) to++;
-          const part = (values: Float64Array, columns: number) =>
-            values.subarray(from * columns, to * columns);
-          counters.take(part(shears, count), part(spans, count - 1), to - from, marks);
-          from = to;
-        }
-      },
+  passAgain(chain, path, job.counting.residue, {
+    begin: () => counters.begin(),
+    take(shears, spans, rows, marks) {
+      for (let from = 0; from < rows; from++) {
+        if (!isSure(marks[from])) continue;
+        let to = from + 1;
+        while (to < rows && isSure(marks[to])) to++;
+        const part = (values: Float64Array, columns: number) =>
+          values.subarray(from * columns, to * columns);
+        counters.take(part(shears, count), part(spans, count - 1), to - from, marks);
+        from = to;
+      }
     },
-  );
+  });
   return counters;
 }
 

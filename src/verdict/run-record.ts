@@ -49,5 +49,11 @@ export function sketchOf(record: RunRecord): RunRecord {
 }
 
 function bounds(values: Float64Array): [number, number] {
-  return [values.reduce((a, b) => Math.min(a, b)), values.reduce((a, b) => Math.max(a, b))];
+  let low = values[0];
+  let high = values[0];
+  for (let i = 1; i < values.length; i++) {
+    if (values[i] < low) low = values[i];
+    if (values[i] > high) high = values[i];
+  }
+  return [low, high];
 }
