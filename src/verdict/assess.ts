@@ -1,7 +1,7 @@
 import type { DamageTables } from '../damage/damage-table.ts';
 import { rangeBins } from '../damage/range-bins.ts';
 import type { Chain } from '../mechanics/chain.ts';
-import { followRecord, type History } from '../mechanics/history.ts';
+import { followRecord, type History, type PassCounter } from '../mechanics/history.ts';
 import { traceConnection } from '../mechanics/trace.ts';
 import type { FilledShare, Job, Run, RunResult, Trace, YearDamage } from '../model.ts';
 import { assessConnection, fastenerSpectrum, fastenerUse } from './connection.ts';
@@ -14,6 +14,8 @@ import { type RunRecord, runRecord } from './run-record.ts';
 import type { RunScene } from './run-scene.ts';
 import { assessSpan, memberUse, type SpanLoad, spanSpectrum, worseSpan } from './span-load.ts';
 import { yearByYear } from './year-by-year.ts';
+
+const UNCOUNTED: PassCounter = { begin() {}, take() {} };
 
 /** A force under this share of EA times the largest strain is rounding. */
 const NOISE = 1e-9;
@@ -101,7 +103,7 @@ function followRun(
     extremes: record.extremes.map((extreme) => extreme.strain),
     residue: job.counting.residue,
   };
-  const history = followRecord(chain, record.path, options, counters);
+  const history = followRecord(chain, record.path, options, record.counted ? counters : UNCOUNTED);
   const noise = NOISE * chain.axialStiffness * record.largestStrain;
   const { years, coveredHours, when } = record;
   const cycle = job.counting.extremesCycle ? extremesCycle(run, record.extremes) : null;

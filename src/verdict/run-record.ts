@@ -15,6 +15,8 @@ export interface RunRecord {
   readonly years: number;
   /** Largest |ε| of record and extremes. */
   readonly largestStrain: number;
+  /** Whether its cycles are worth counting: a sketch has too few to do any damage. */
+  readonly counted: boolean;
   /** Words for when a mark of the path was. */
   readonly when: (mark: number) => string;
 }
@@ -34,18 +36,19 @@ export function runRecord(run: Run, job: Job): RunRecord {
     coveredHours: hours,
     years: yearsOf(hours, job.represents),
     largestStrain: Math.max(...reached.map(Math.abs)),
+    counted: true,
     when: (mark) => momentText(path, mark, job.axis.times, extremes),
   };
 }
 
 /**
  * A sketch of a record, that costs next to nothing to follow: it only goes to and fro between the record's largest and
- * smallest mismatch strain. Peaks and ranges come out near the whole record's, damage far too small.
+ * smallest mismatch strain. Peaks and ranges come out near the whole record's, and no damage.
  */
 export function sketchOf(record: RunRecord): RunRecord {
   const [low, high] = bounds(record.strain);
   const strain = Float64Array.of(high, low, high, low);
-  return { ...record, strain, path: strainPath(strain), when: () => '' };
+  return { ...record, strain, path: strainPath(strain), counted: false, when: () => '' };
 }
 
 function bounds(values: Float64Array): [number, number] {
