@@ -341,7 +341,7 @@ export interface CountingSettings {
   /** Stress ranges of a member under this are dropped [MPa]; 0 is none. */
   readonly stressGate: number;
   /** Whether one cycle a year between the hottest and the coldest extreme is added to the damage. */
-  readonly extremesCycle: boolean;
+  readonly extremesCycle: 'short' | 'yes' | 'no';
 }
 
 /** What remedies may propose, and how their slots and gaps are rounded up. */

@@ -333,11 +333,12 @@ export const COUNTING_KEYS = {
       'Stress ranges of a member under this, its factors applied, are dropped, and said to be.',
   },
   extremes_cycle: {
-    kind: 'yes or no',
-    default: 'no',
+    kind: 'choice',
+    choices: ['short', 'yes', 'no'],
+    default: 'short',
     example: 'yes',
     meaning:
-      'Whether one cycle a year between the hottest and the coldest of `extremes` is added to the damage.',
+      'Whether one cycle a year between the hottest and the coldest of `extremes` is added to the damage; `short` adds it where damage is scaled from less than a year, which does not hold its own.',
   },
 } as const satisfies KeyTable;
 

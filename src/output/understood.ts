@@ -150,7 +150,7 @@ function limitsText({ limits, counting, represents }: Job): string {
       `allowed damage ${shortNumber(limits.damage)}`,
       `factors: load ${limits.loadFactor}, member ${limits.memberFactor}, fastener ${limits.fastenerFactor}, static ${limits.staticFactor}`,
       `residue ${counting.residue}`,
-      ...(counting.extremesCycle ? ['a cycle a year between the extremes'] : []),
+      ...(counting.extremesCycle === 'yes' ? ['a cycle a year between the extremes'] : []),
       `a pass of the record stands for ${stands}`,
     ].join('; '),
     '  ',

@@ -4,6 +4,7 @@ import type { Chain } from '../mechanics/chain.ts';
 import { followRecord, type History, type PassCounter } from '../mechanics/history.ts';
 import { traceConnection } from '../mechanics/trace.ts';
 import type { FilledShare, Job, Run, RunResult, Trace, YearDamage } from '../model.ts';
+import { scaledFrom } from '../temperature/short-season.ts';
 import { assessConnection, fastenerSpectrum, fastenerUse } from './connection.ts';
 import { extremesCycle } from './extremes-cycle.ts';
 import { filledShares } from './filled-shares.ts';
@@ -106,7 +107,7 @@ function followRun(
   const history = followRecord(chain, record.path, options, record.counted ? counters : UNCOUNTED);
   const noise = NOISE * chain.axialStiffness * record.largestStrain;
   const { years, coveredHours, when } = record;
-  const cycle = job.counting.extremesCycle ? extremesCycle(run, record.extremes) : null;
+  const cycle = wantsExtremesCycle(job, record) ? extremesCycle(run, record.extremes) : null;
   const scene: RunScene = {
     run,
     job,
@@ -121,6 +122,12 @@ function followRun(
   };
   const spans = counters.spans.map((_, j) => assessSpan(scene, j));
   return { assessment: assessmentOf(scene, spans), scene, spans, chain, record };
+}
+
+/** A record of less than a year does not hold the year's own swing. */
+function wantsExtremesCycle({ counting }: Job, record: RunRecord): boolean {
+  const { extremesCycle: wanted } = counting;
+  return wanted === 'yes' || (wanted === 'short' && scaledFrom(record) !== null);
 }
 
 function assessmentOf(scene: RunScene, spans: readonly SpanLoad[]): RunAssessment {

@@ -69,7 +69,7 @@ export function makeResult(recipe: ResultRecipe = {}): Result {
       fastenerFactor: 1.35,
       staticFactor: 1.5,
     },
-    counting: { residue: 'repeat', forceGate: 0, stressGate: 0, extremesCycle: false },
+    counting: { residue: 'repeat', forceGate: 0, stressGate: 0, extremesCycle: 'no' },
     remedies: {
       longestTravel: 20,
       slotTravels: null,

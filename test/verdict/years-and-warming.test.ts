@@ -95,7 +95,7 @@ describe('a cycle a year between the extremes', () => {
   const added = (FACTOR * pairShear(100)) ** M / C;
 
   it.each([8760, 2400])('adds exactly its own damage to a record of %d h', async (hours) => {
-    const off = await damageOf(hours, extremes);
+    const off = await damageOf(hours, `${extremes}counting: { extremes_cycle: no }\n`);
     const on = await damageOf(hours, `${extremes}counting: { extremes_cycle: yes }\n`);
     expect((on.damage - off.damage) / added).toBeCloseTo(1, 6);
     expect(on.run.connections[0].cyclesPerYear - off.run.connections[0].cyclesPerYear).toBeCloseTo(
@@ -112,7 +112,8 @@ describe('a cycle a year between the extremes', () => {
   it('is said to be on or off, and is none between fewer than two', async () => {
     const text = async (more: string) =>
       summary(screen(await jobFor(csvRecord(START, 2400, { 'bar [degC]': weather(8) }), more)));
-    expect(await text(extremes)).toMatch(/extremes_cycle is\s+off/);
+    const off = 'counting: { extremes_cycle: no }\n';
+    expect(await text(extremes + off)).toMatch(/extremes_cycle is\s+off/);
     const on = 'counting: { extremes_cycle: yes }\n';
     expect(await text(extremes + on)).toMatch(/between the extremes summer and frost/);
     const one = 'extremes: [{ name: summer, bar: 71 degC }]\n';
@@ -120,8 +121,14 @@ describe('a cycle a year between the extremes', () => {
     expect(await text('')).not.toContain('extremes_cycle is');
   });
 
+  it('is added by itself to a season short of a year only', async () => {
+    const cycleOf = async (hours: number) => (await damageOf(hours, extremes)).run.extremesCycle;
+    expect(await cycleOf(2400)).toEqual({ hot: 'summer', cold: 'frost' });
+    expect(await cycleOf(8760)).toBeNull();
+  });
+
   it('leaves peaks as they are', async () => {
-    const off = await damageOf(2400, extremes);
+    const off = await damageOf(2400, `${extremes}counting: { extremes_cycle: no }\n`);
     const on = await damageOf(2400, `${extremes}counting: { extremes_cycle: yes }\n`);
     expect(on.run.connections[0].shearPeak).toBe(off.run.connections[0].shearPeak);
     expect(on.run.connections[0].shearRange).toBe(off.run.connections[0].shearRange);

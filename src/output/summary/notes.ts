@@ -53,9 +53,11 @@ function record({ job, runs }: Result): string[] {
 
 /** Whether the damage holds a cycle a year between the extremes; nothing to say where no run has two. */
 function extremesCycleLines({ job, runs }: Pick<Result, 'job' | 'runs'>): string[] {
-  if (!job.counting.extremesCycle) {
+  const { extremesCycle: wanted } = job.counting;
+  if (wanted === 'no' || (wanted === 'short' && scaledFrom(...runs) === null)) {
+    const why = wanted === 'no' ? 'is off' : 'adds one to seasons short of a year only';
     return [
-      'Extremes are for peaks and slips only. The damage holds no cycle between them: counting.extremes_cycle is off.',
+      `Extremes are for peaks and slips only. The damage holds no cycle between them: counting.extremes_cycle ${why}.`,
     ];
   }
   const pairs = new Map<string, string[]>();
