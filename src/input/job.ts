@@ -12,7 +12,7 @@ import { type Findings, noFindings, report } from './findings.ts';
 import { JOB_KEYS } from './keys.ts';
 import { readMembers } from './members.ts';
 import { readKeys } from './read-keys.ts';
-import { readRecordBasis } from './record-basis.ts';
+import { keptOf, readRecordBasis } from './record-basis.ts';
 import { readRuns } from './runs.ts';
 import { readCounting, readLimits, readRemedies, readWarming } from './settings.ts';
 import { emptyMap, givenValue, placeOf, type Source, type SourceMap } from './source.ts';
@@ -88,12 +88,8 @@ async function readWhole(map: SourceMap, files: Files, findings: Findings): Prom
   return {
     title: values.title,
     units: values.units,
-    axis: basis.axis,
+    ...keptOf(basis),
     zones: [...zones.items.values()],
-    recordFindings: basis.found,
-    recordReadAs: basis.record.readAs,
-    represents: basis.represents,
-    weather: basis.weather,
     warming,
     extremes,
     limits,

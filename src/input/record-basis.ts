@@ -38,6 +38,11 @@ export interface RecordBasis {
   readonly sun: () => SunPath | null;
 }
 
+/** What a job keeps of its record. */
+export function keptOf({ axis, found, record, represents, weather }: RecordBasis) {
+  return { axis, recordFindings: found, recordReadAs: record.readAs, represents, weather };
+}
+
 /**
  * Reads the record that the job names.
  *

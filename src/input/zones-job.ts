@@ -2,7 +2,7 @@ import type { ZonesJob } from '../model.ts';
 import { readJobWith } from './job.ts';
 import { JOB_KEYS, type Key } from './keys.ts';
 import { readKeys } from './read-keys.ts';
-import { readRecordBasis } from './record-basis.ts';
+import { keptOf, readRecordBasis } from './record-basis.ts';
 import { emptyMap } from './source.ts';
 import { readZones } from './zones.ts';
 
@@ -21,12 +21,8 @@ export function readZonesJob(path: string): Promise<ZonesJob> {
     return {
       title: values.title,
       units: values.units,
-      axis: basis.axis,
+      ...keptOf(basis),
       zones: [...zones.items.values()],
-      recordFindings: basis.found,
-      recordReadAs: basis.record.readAs,
-      represents: basis.represents,
-      weather: basis.weather,
       inputs: files.inputs,
       defaults: findings.defaults,
       warnings: findings.warnings,

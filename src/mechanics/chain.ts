@@ -1,5 +1,5 @@
 import { type Chain, type ChainSpec, chainState, MARK, STRAIN } from './chain-state.ts';
-import { bookSlide, changeMode, releaseJoints, slipOf } from './joint.ts';
+import { bookSlide, changeMode, forceOf, releaseJoints, slipOf } from './joint.ts';
 import { solveRates } from './rates.ts';
 import type { RowSink } from './row-sink.ts';
 
@@ -69,9 +69,7 @@ export function moveTo(chain: Chain, strain: number, sink: RowSink | null = null
 
 /** Forces f of every connection on the member's fasteners now [N], into `out` (n). */
 export function readForces(chain: Chain, out: Float64Array): void {
-  for (let i = 0; i < chain.count; i++) {
-    out[i] = chain.tangent[i] * chain.movement[i] + chain.offset[i];
-  }
+  for (let i = 0; i < chain.count; i++) out[i] = forceOf(chain, i);
 }
 
 /** Slips s of every joint now [mm], into `out` (n). */
@@ -83,7 +81,7 @@ export function readSlips(chain: Chain, out: Float64Array): void {
 export function readSpanForces(chain: Chain, out: Float64Array): void {
   let force = 0;
   for (let j = 0; j < chain.count - 1; j++) {
-    force += chain.tangent[j] * chain.movement[j] + chain.offset[j];
+    force += forceOf(chain, j);
     out[j] = force;
   }
 }

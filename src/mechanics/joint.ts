@@ -42,10 +42,14 @@ export function slipOf(chain: Chain, i: number): number {
   return mode[i] === STUCK ? rest[i] : rest[i] + (1 - tangent[i] / stiffness[i]) * movement[i];
 }
 
+/** Shear f of connection i now [N]. */
+export function forceOf(chain: Chain, i: number): number {
+  return chain.offset[i] + chain.tangent[i] * chain.movement[i];
+}
+
 /** Movement d of the member against the structure at joint i now [mm]. */
 export function movementOf(chain: Chain, i: number): number {
-  const force = chain.offset[i] + chain.tangent[i] * chain.movement[i];
-  return force / chain.stiffness[i] + slipOf(chain, i);
+  return forceOf(chain, i) / chain.stiffness[i] + slipOf(chain, i);
 }
 
 /** Books the slide of joint i up to now: sliding distance and largest slip. */

@@ -1,5 +1,5 @@
 import { type Chain, moveTo } from './chain.ts';
-import { slipOf } from './joint.ts';
+import { forceOf, slipOf } from './joint.ts';
 
 /** What one connection feels at each sample of a pass. */
 export interface ConnectionTrace {
@@ -35,8 +35,4 @@ export function traceConnection(
     if (hasSpan) for (let i = 0; i <= span; i++) trace.spanForce[sample] += forceOf(chain, i);
   }
   return trace;
-}
-
-function forceOf(chain: Chain, i: number): number {
-  return chain.tangent[i] * chain.movement[i] + chain.offset[i];
 }

@@ -1,24 +1,19 @@
-import { spawnSync } from 'node:child_process';
 import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { fileURLToPath } from 'node:url';
 import { type BenchRow, inTurns } from './in-turns.ts';
-
-/** The repository's root, from where the bundled bench stands. */
-const ROOT = fileURLToPath(new URL('..', import.meta.url));
+import { runNode, runProgram } from './run-node.ts';
 
 /** Whole commands, each in a process of its own, against a Node that does nothing. */
 export function jobsBench(): BenchRow[] {
   const out = mkdtempSync(join(tmpdir(), 'daystrain-bench-'));
   const screen = (job: string, ...options: string[]) => {
-    return () =>
-      run('dist/cli.js', 'screen', job, '--out', join(out, options.join('')), ...options);
+    return () => runProgram('screen', job, '--out', join(out, options.join('')), ...options);
   };
   const one = 'test/jobs/one-run';
   const example = 'examples/skerry-landing';
   const rows = inTurns(
-    () => run('-e', '0'),
+    () => runNode('-e', '0'),
     [
       {
         name: 'a one-run job of a year, without charts',
@@ -42,8 +37,3 @@ export function jobsBench(): BenchRow[] {
 
 /** Charts of a job by default. */
 const CHARTS = 4;
-
-function run(...args: string[]): void {
-  const { status, stderr } = spawnSync(process.execPath, args, { cwd: ROOT, encoding: 'utf8' });
-  if (status !== 0) throw new Error(stderr);
-}

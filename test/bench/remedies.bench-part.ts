@@ -1,12 +1,9 @@
-import { spawnSync } from 'node:child_process';
 import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { fileURLToPath } from 'node:url';
 import { type BenchRow, inTurns } from './in-turns.ts';
+import { runProgram } from './run-node.ts';
 
-/** The repository's root, from where the bundled bench stands. */
-const ROOT = fileURLToPath(new URL('..', import.meta.url));
 const JOB = 'examples/skerry-landing';
 
 /** What the search for remedies may take beyond screening the job without it [ms]. */
@@ -16,7 +13,7 @@ const ALLOWED = 5000;
 export function remediesBench(): BenchRow[] {
   const out = mkdtempSync(join(tmpdir(), 'daystrain-bench-'));
   const screen = (...options: string[]) =>
-    run('screen', JOB, '--charts', 'none', '--out', join(out, 'results'), ...options);
+    runProgram('screen', JOB, '--charts', 'none', '--out', join(out, 'results'), ...options);
   const [{ milliseconds, ratio }] = inTurns(
     () => screen('--no-remedies'),
     [{ name: '', goal: null, run: () => screen() }],
@@ -26,12 +23,4 @@ export function remediesBench(): BenchRow[] {
   const beyond = milliseconds - milliseconds / ratio;
   const name = 'remedies of the whole example, of a year';
   return [{ name, goal: 1, ratio: beyond / ALLOWED, milliseconds: beyond }];
-}
-
-function run(...args: string[]): void {
-  const { status, stderr } = spawnSync(process.execPath, ['dist/cli.js', ...args], {
-    cwd: ROOT,
-    encoding: 'utf8',
-  });
-  if (status !== 0) throw new Error(stderr);
 }

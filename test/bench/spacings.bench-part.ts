@@ -1,12 +1,9 @@
-import { spawnSync } from 'node:child_process';
 import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { fileURLToPath } from 'node:url';
 import { type BenchRow, inTurns } from './in-turns.ts';
+import { runProgram } from './run-node.ts';
 
-/** The repository's root, from where the bundled bench stands. */
-const ROOT = fileURLToPath(new URL('..', import.meta.url));
 const JOB = 'examples/skerry-landing';
 
 /** What a comparison may take beyond starting and reading the job [ms]. */
@@ -17,13 +14,13 @@ export function spacingsBench(): BenchRow[] {
   const out = mkdtempSync(join(tmpdir(), 'daystrain-bench-'));
   const steps = ['--from', '300 mm', '--to', '1200 mm', '--by', '100 mm'];
   const [{ milliseconds, ratio }] = inTurns(
-    () => run('check', JOB),
+    () => runProgram('check', JOB),
     [
       {
         name: '',
         goal: null,
         run: () =>
-          run('spacings', JOB, ...steps, '--charts', 'none', '--out', join(out, 'results')),
+          runProgram('spacings', JOB, ...steps, '--charts', 'none', '--out', join(out, 'results')),
       },
     ],
     5,
@@ -32,12 +29,4 @@ export function spacingsBench(): BenchRow[] {
   const beyond = milliseconds - milliseconds / ratio;
   const name = 'twelve runs at ten spacings over a year, without charts';
   return [{ name, goal: 1, ratio: beyond / ALLOWED, milliseconds: beyond }];
-}
-
-function run(...args: string[]): void {
-  const { status, stderr } = spawnSync(process.execPath, ['dist/cli.js', ...args], {
-    cwd: ROOT,
-    encoding: 'utf8',
-  });
-  if (status !== 0) throw new Error(stderr);
 }
